@@ -13,11 +13,11 @@ export async function runBrowserHost(
   print: (line: string) => void,
 ): Promise<void> {
   const host = await startBrowserHost(options)
-  print(host.address)
   await new Promise<void>((resolve) => {
     const stopWatching = watchParent(end)
     process.once('SIGINT', end)
     process.once('SIGTERM', end)
+    print(host.address)
     function end(): void {
       stopWatching()
       process.off('SIGINT', end)
