@@ -1,0 +1,71 @@
+import { makeNodes } from './makeNodes'
+import { evaluateInitial } from '../line/evaluateInitial'
+import type { Line } from '../line/line'
+import { makeBlocks, type Block } from './block'
+import { makeDelayEnvelope } from './delayEnvelope'
+import { makeDelayLine } from './delayLine'
+import { enterWorkspace, f, g, makeGradedState, T } from './gradedWorkspace'
+import type { LiveBlock, WaveRun } from './waveRun'
+
+/**
+ * Sets up a line for the method of characteristics: blocks with their initial waves, and the laws
+ * at the nodes between them.
+ *
+ * @param line the cut line
+ */
+export function makeWaveRun(line: Line): WaveRun {
+  const plain = (node: number) => line.nodes[node].kind === 'step' && line.nodes[node].loads.length === 0
+  const drafts = makeBlocks(line.spans, plain)
+  const graded = makeGradedState(
+    drafts.reduce((sum, block) => sum + (block.kind === 'graded' ? block.cells + 1 : 0), 0),
+  )
+  enterWorkspace(graded)
+  let slot = 0
+  const blocks = drafts.map((draft) => {
+    if (draft.kind === 'delay') return makeDelayBlock(line, draft)
+    const block = makeGradedBlock(line, draft, slot)
+    slot += draft.cells + 1
+    return block
+  })
+  return { line, blocks, graded, ...makeNodes(line, blocks) }
+}
+
+function makeDelayBlock(line: Line, draft: Block): LiveBlock {
+  const { cells: n, firstSpan, impedance } = draft
+  const Z = impedance[0]
+  const delay = makeDelayLine(n, line.steps)
+  for (let p = 0; p <= n; p++) {
+    const { force, velocity } = evaluateInitial(line, firstSpan, p)
+    if (p > 0) delay.right[n - p] = (force - Z * velocity) / 2
+    if (p < n) delay.left[p] = (force + Z * velocity) / 2
+  }
+  return {
+    ...draft,
+    left: { impedance: Z, arriving: delay.left, leaving: delay.right, leavingOffset: n },
+    right: { impedance: Z, arriving: delay.right, leaving: delay.left, leavingOffset: n },
+    delay: { line: delay, envelope: makeDelayEnvelope(delay, line.steps + 1) },
+    slot: -1,
+    probes: [],
+  }
+}
+
+function makeGradedBlock(line: Line, draft: Block, slot: number): LiveBlock {
+  const { cells, impedance: Z, firstSpan, lastSpan, spanStart } = draft
+  for (let i = 1; i < cells; i++) T[slot + i] = (2 * Z[i]) / (Z[i - 1] + Z[i])
+  for (let span = firstSpan; span <= lastSpan; span++) {
+    const start = spanStart[span - firstSpan]
+    for (let p = 0; p <= line.spans[span].cells; p++) {
+      const { force, velocity } = evaluateInitial(line, span, p)
+      const i = start + p
+      if (p > 0) f[slot + i - 1] = (force - Z[i - 1] * velocity) / 2
+      if (p < line.spans[span].cells) g[slot + i] = (force + Z[i] * velocity) / 2
+    }
+  }
+  const makePort = (impedance: number) => ({
+    impedance,
+    arriving: new Float64Array(line.steps + 1),
+    leaving: new Float64Array(line.steps + 1),
+    leavingOffset: 0,
+  })
+  return { ...draft, left: makePort(Z[0]), right: makePort(Z[cells - 1]), delay: null, slot, probes: [] }
+}

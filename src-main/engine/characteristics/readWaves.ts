@@ -1,0 +1,117 @@
+import { evaluateInner } from './advanceWaves'
+import { enterWorkspace, f, g, high, highStep, low, lowStep, WIDENING } from './gradedWorkspace'
+import type { LiveBlock, WaveRun } from './waveRun'
+
+/** Energy and momentum in a block between two steps. */
+export interface BlockState {
+  /** [J] */
+  kinetic: number
+  strain: number
+  /** In the falling frame [kg m/s]. */
+  momentum: number
+  /** Mass of its cells, sum of Z dt [kg]. */
+  mass: number
+}
+
+/**
+ * Sums a block's cells after step k (k = -1: before the first): kinetic `dt (g - f + Z G)^2 / 2 Z`,
+ * strain `dt (f + g)^2 / 2 Z`, momentum `dt (g - f)`; kinetic + strain = `dt (f^2 + g^2)/Z` at G = 0.
+ *
+ * @param frame velocity G of the falling frame [m/s]
+ */
+export function sumBlock(run: WaveRun, block: LiveBlock, k: number, frame: number): BlockState {
+  const { dt } = run.line
+  const { cells: n, impedance, delay, slot } = block
+  let kinetic = 0
+  let strain = 0
+  let momentum = 0
+  let mass = 0
+  if (delay) {
+    const { right, left } = delay.line
+    const Z = impedance[0]
+    for (let i = 0; i < n; i++) {
+      const fi = right[k + n - i]
+      const gi = left[k + i + 1]
+      const v = gi - fi + Z * frame
+      kinetic += v * v
+      strain += (fi + gi) ** 2
+      momentum += gi - fi
+    }
+    kinetic /= Z
+    strain /= Z
+    mass = n * Z
+  } else {
+    enterWorkspace(run.graded)
+    for (let i = 0; i < n; i++) {
+      const Z = impedance[i]
+      const fi = f[slot + i]
+      const gi = g[slot + i]
+      const v = gi - fi + Z * frame
+      kinetic += (v * v) / Z
+      strain += (fi + gi) ** 2 / Z
+      momentum += gi - fi
+      mass += Z
+    }
+  }
+  return { kinetic: (dt * kinetic) / 2, strain: (dt * strain) / 2, momentum: dt * momentum, mass: dt * mass }
+}
+
+/**
+ * Force at a position of a block at step k [N]. For a delay line any step marched so far; for the
+ * inside of a graded block the latest step only.
+ */
+export function readForce(block: LiveBlock, position: number, k: number): number {
+  const { delay, cells, left, right } = block
+  if (delay) return delay.line.right[k - position + cells] + delay.line.left[k + position]
+  if (position === 0) return left.arriving[k] + left.leaving[k]
+  if (position === cells) return right.arriving[k] + right.leaving[k]
+  return evaluateInner(block, position).force
+}
+
+/** Largest tension and compression of a block at each position, with the steps, shape (cells + 1). */
+export function readEnvelope(
+  run: WaveRun,
+  block: LiveBlock,
+): { high: Float64Array; low: Float64Array; highStep: Int32Array; lowStep: Int32Array } {
+  const narrow = (values: Float64Array) => values.map((value) => value / WIDENING)
+  if (block.delay) {
+    const { envelope } = block.delay
+    return { ...envelope, high: narrow(envelope.high), low: narrow(envelope.low) }
+  }
+  enterWorkspace(run.graded)
+  const cut = <A extends Float64Array | Int32Array>(array: A) =>
+    array.slice(block.slot, block.slot + block.cells + 1) as A
+  return { high: narrow(cut(high)), low: narrow(cut(low)), highStep: cut(highStep), lowStep: cut(lowStep) }
+}
+
+/**
+ * Force and velocity (falling frame) at a position of a block over the whole run, shape (steps + 1).
+ * An inner position of a graded block must have a probe.
+ */
+export function readTrace(
+  run: WaveRun,
+  block: LiveBlock,
+  position: number,
+): { force: Float64Array; velocity: Float64Array } {
+  const probe = block.probes.find((one) => one.position === position)
+  if (probe) return probe
+  const count = run.line.steps + 1
+  const force = new Float64Array(count)
+  const velocity = new Float64Array(count)
+  const { cells: n, delay, impedance } = block
+  const port = position === 0 ? block.left : block.right
+  const Y = 1 / (delay ? impedance[0] : port.impedance)
+  const sign = position === 0 ? 1 : -1
+  for (let k = 0; k < count; k++) {
+    if (delay) {
+      const fk = delay.line.right[k - position + n]
+      const gk = delay.line.left[k + position]
+      force[k] = fk + gk
+      velocity[k] = (gk - fk) * Y
+    } else {
+      force[k] = port.arriving[k] + port.leaving[k]
+      velocity[k] = sign * (port.arriving[k] - port.leaving[k]) * Y
+    }
+  }
+  return { force, velocity }
+}

@@ -1,0 +1,39 @@
+import { CompensatedSum } from './compensatedSum'
+import type { NodeLaw, Side } from './side'
+
+/**
+ * Flat faces that press but never pull: `F <= 0`, with a gap `d >= 0` kept at the half steps.
+ * Over a step either the faces are apart (`F = 0`) or they end it touching,
+ * `d + dt (v_right - v_left) = 0`. A gap that closes inside a step takes `-F d` of energy,
+ * first order in dt, which is booked as the joint's loss.
+ *
+ * @param gap at the start [m], zero or positive
+ * @param dt [s]
+ */
+export function makeContact(left: Side, right: Side, gap: number, dt: number): NodeLaw {
+  const Y = left.admittance + right.admittance
+  const lost = new CompensatedSum()
+  let d = gap
+  return {
+    advance(from, to) {
+      for (let k = from; k < to; k++) {
+        const vl = left.freeVelocity(k)
+        const vr = right.freeVelocity(k)
+        const apart = d + dt * (vr - vl)
+        if (apart >= 0) {
+          d = apart
+          left.take(k, 0, vl)
+          right.take(k, 0, vr)
+        } else {
+          const F = apart / (dt * Y)
+          if (d !== 0) lost.add(-F * d)
+          d = 0
+          left.take(k, F, vl + left.admittance * F)
+          right.take(k, F, vr - right.admittance * F)
+        }
+      }
+    },
+    strain: () => 0,
+    dissipated: () => lost.value,
+  }
+}

@@ -1,0 +1,87 @@
+import { readTrace } from '../characteristics/readWaves'
+import type { LiveBlock, WaveRun } from '../characteristics/waveRun'
+import type { Gauge } from '../../contract/rig'
+import type { Line } from '../line/line'
+import type { PlaceTrace } from './record'
+
+/** Where a gauge lies: between positions `position` and `position + 1` of a span, `share` of the way. */
+interface Spot {
+  span: number
+  position: number
+  share: number
+}
+
+/** Distance from a position, in cells, under which a gauge lies on it. */
+const SAME = 1e-9
+
+/**
+ * Finds the spot of a gauge. On a step between two sections it lies in the right-hand one.
+ */
+export function findSpot(line: Line, gauge: Gauge): Spot {
+  const bar = line.bars[gauge.bar]
+  const x = bar.from + gauge.at
+  let span = bar.firstSpan
+  while (span < bar.lastSpan && x >= line.spans[span].to) span++
+  const { from, to, cells } = line.spans[span]
+  const along = Math.min(cells, Math.max(0, ((x - from) / (to - from)) * cells))
+  const nearest = Math.round(along)
+  if (Math.abs(along - nearest) < SAME) return { span, position: nearest, share: 0 }
+  return { span, position: Math.floor(along), share: along - Math.floor(along) }
+}
+
+/** Asks graded blocks to keep the histories that a gauge will need; call before the first step. */
+export function addProbes(run: WaveRun): void {
+  for (const gauge of run.line.rig.gauges) {
+    const spot = findSpot(run.line, gauge)
+    const block = findBlock(run, spot.span)
+    const first = block.spanStart[spot.span - block.firstSpan] + spot.position
+    for (const position of spot.share > 0 ? [first, first + 1] : [first]) {
+      const inner = block.delay === null && position > 0 && position < block.cells
+      if (!inner || block.probes.some((probe) => probe.position === position)) continue
+      const count = run.line.steps + 1
+      block.probes.push({ position, force: new Float64Array(count), velocity: new Float64Array(count) })
+    }
+  }
+}
+
+/**
+ * Traces a gauge over the whole run. Between two positions force and velocity are interpolated
+ * linearly, which is second order in the cell for a smooth wave and spreads a sharp front over one step.
+ */
+export function traceGauge(run: WaveRun, gauge: Gauge): PlaceTrace {
+  const { line } = run
+  const { span: index, position, share } = findSpot(line, gauge)
+  const span = line.spans[index]
+  const block = findBlock(run, index)
+  const first = block.spanStart[index - block.firstSpan] + position
+  const here = readTrace(run, block, first)
+  const there = share > 0 ? readTrace(run, block, first + 1) : here
+  const s = span.sFrom + ((span.sTo - span.sFrom) * (position + share)) / span.cells
+  const { material, shape } = span.source
+  const area = shape.area(s)
+  const Z = Math.sqrt(material.modulus * material.density) * area
+  const count = line.steps + 1
+  const trace: PlaceTrace = {
+    x: line.bars[gauge.bar].from + gauge.at,
+    area,
+    impedance: Z,
+    modulus: material.modulus,
+    force: new Float64Array(count),
+    velocity: new Float64Array(count),
+    rightgoing: new Float64Array(count),
+    leftgoing: new Float64Array(count),
+  }
+  for (let k = 0; k < count; k++) {
+    const F = here.force[k] + share * (there.force[k] - here.force[k])
+    const v = here.velocity[k] + share * (there.velocity[k] - here.velocity[k])
+    trace.force[k] = F
+    trace.velocity[k] = v + line.rig.gravity * line.dt * k
+    trace.rightgoing[k] = (F - Z * v) / 2
+    trace.leftgoing[k] = (F + Z * v) / 2
+  }
+  return trace
+}
+
+function findBlock(run: WaveRun, span: number): LiveBlock {
+  return run.blocks.find((block) => span >= block.firstSpan && span <= block.lastSpan)!
+}
