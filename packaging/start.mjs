@@ -3,15 +3,12 @@
  * serves the same page to this machine's browser. `npm start -- --browser` goes straight to that.
  */
 import { spawn, spawnSync } from 'node:child_process'
-import { existsSync } from 'node:fs'
-import { createRequire } from 'node:module'
-import { dirname, join } from 'node:path'
+import { join } from 'node:path'
 import { fileURLToPath } from 'node:url'
+import { electronFolder, hasElectronRuntime } from './electronRuntime.mjs'
 
 const FETCH_TIME = 60_000
 const top = fileURLToPath(new URL('..', import.meta.url))
-const electron = dirname(createRequire(import.meta.url).resolve('electron/package.json'))
-const runtimeIsThere = () => existsSync(join(electron, 'path.txt'))
 
 const built = spawnSync('npm', ['run', 'build', '--silent'], {
   cwd: top,
@@ -20,17 +17,17 @@ const built = spawnSync('npm', ['run', 'build', '--silent'], {
 })
 if (built.status !== 0) process.exit(1)
 
-if (!process.argv.includes('--browser') && !runtimeIsThere()) {
+if (!process.argv.includes('--browser') && !hasElectronRuntime()) {
   console.error("Electron's runtime is not on this machine yet; trying to fetch it, for a minute at most.")
-  spawnSync(process.execPath, [join(electron, 'install.js')], { stdio: 'ignore', timeout: FETCH_TIME })
-  if (!runtimeIsThere()) {
+  spawnSync(process.execPath, [join(electronFolder, 'install.js')], { stdio: 'ignore', timeout: FETCH_TIME })
+  if (!hasElectronRuntime()) {
     console.error('It cannot be fetched from here. The same page opens in your browser instead:')
   }
 }
 
-const inWindow = !process.argv.includes('--browser') && runtimeIsThere()
+const inWindow = !process.argv.includes('--browser') && hasElectronRuntime()
 const child = inWindow
-  ? spawn(process.execPath, [join(electron, 'cli.js'), top], { stdio: 'inherit' })
+  ? spawn(process.execPath, [join(electronFolder, 'cli.js'), top], { stdio: 'inherit' })
   : spawn(process.execPath, [join(top, 'out/main/browserHost.js')], { stdio: ['pipe', 'inherit', 'inherit'] })
 for (const signal of ['SIGINT', 'SIGTERM']) process.on(signal, () => child.kill(signal))
 child.on('exit', (code) => process.exit(code ?? 0))
