@@ -63,9 +63,24 @@ export default tseslint.config(
     rules: {
       'no-restricted-globals': [
         'error',
-        ...named('The engine knows no clock.', 'Date', 'performance', 'setTimeout', 'setInterval', 'setImmediate'),
+        ...named(
+          'The engine knows no clock.',
+          'Date',
+          'performance',
+          'setTimeout',
+          'setInterval',
+          'setImmediate',
+        ),
         ...named('The engine knows no Node.', 'process', 'Buffer', 'require', 'global'),
-        ...named('The engine knows no page.', 'window', 'document', 'navigator', 'fetch', 'self', 'globalThis'),
+        ...named(
+          'The engine knows no page.',
+          'window',
+          'document',
+          'navigator',
+          'fetch',
+          'self',
+          'globalThis',
+        ),
         ...named('The engine prints nothing; it returns faults and cautions.', 'console'),
         ...named('The engine knows no locale.', 'Intl'),
       ],
@@ -81,8 +96,14 @@ export default tseslint.config(
         'error',
         {
           patterns: [
-            { group: ['node:*', 'fs', 'path', 'os', 'crypto', 'worker_threads'], message: 'The engine knows no Node.' },
-            { group: ['electron', 'electron/*', 'vue', 'chart.js'], message: 'The engine knows no page and no host.' },
+            {
+              group: ['node:*', 'fs', 'path', 'os', 'crypto', 'worker_threads'],
+              message: 'The engine knows no Node.',
+            },
+            {
+              group: ['electron', 'electron/*', 'vue', 'chart.js'],
+              message: 'The engine knows no page and no host.',
+            },
           ],
         },
       ],

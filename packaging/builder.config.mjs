@@ -20,7 +20,12 @@ export default {
     loadBrowserProcessSpecificV8Snapshot: false,
     grantFileProtocolExtraPrivileges: false,
   },
-  linux: { target: ['AppImage', 'deb'], category: 'Science', icon: 'packaging/icons', maintainer: 'Barwright authors' },
+  linux: {
+    target: ['AppImage', 'deb'],
+    category: 'Science',
+    icon: 'packaging/icons',
+    maintainer: 'Barwright authors',
+  },
   win: { target: ['nsis'], icon: 'packaging/icon.ico' },
   nsis: { oneClick: false, perMachine: false, allowToChangeInstallationDirectory: true },
   mac: { target: ['dmg'], category: 'public.app-category.utilities', icon: 'packaging/icons/512x512.png' },

@@ -16,7 +16,9 @@ const wantsInstallers = process.argv.includes('--installers')
 const hasRuntime = hasElectronRuntime()
 
 if (!hasRuntime && (wantsInstallers || process.platform === 'darwin')) {
-  console.error("This needs Electron's runtime, which is not on this machine: npx install-electron fetches it.")
+  console.error(
+    "This needs Electron's runtime, which is not on this machine: npx install-electron fetches it.",
+  )
   process.exit(1)
 }
 

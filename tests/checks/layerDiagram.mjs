@@ -14,11 +14,13 @@ export function drawLayers() {
     storeys[storey] = [...(storeys[storey] ?? []), layer]
   }
   const width = Math.max(...layers.map(({ name }) => name.length)) + 2
-  const lines = storeys.reverse().flatMap((row, index) => [
-    ...(index === 0 ? [] : ['  |']),
-    ...row.map(({ name, what }) => `  ${name.padEnd(width)}${what}`),
-  ])
-  const table = layers.map(({ name, may }) => `| \`${name}\` | ${may.join(', ') || 'nothing'} |`)
+  const lines = storeys
+    .reverse()
+    .flatMap((row, index) => [
+      ...(index === 0 ? [] : ['  |']),
+      ...row.map(({ name, what }) => `  ${name.padEnd(width)}${what}`),
+    ])
+  const table = layers.map(({ name, may }) => `| \`${name}\` | ${listNames(may)} |`)
   return [
     START,
     '',
@@ -38,6 +40,13 @@ export function drawLayers() {
 export function findDiagram() {
   const text = readFileSync(developers, 'utf8')
   return text.slice(text.indexOf(START), text.indexOf(END) + END.length)
+}
+
+function listNames(may) {
+  const rooms = layers.map(({ name }) => name).filter((name) => name.startsWith('engine/'))
+  const all = rooms.every((room) => may.includes(room))
+  const names = all ? [...may.filter((name) => !rooms.includes(name)), 'every room of the engine'] : may
+  return names.join(', ') || 'nothing'
 }
 
 function storeyOf(name) {

@@ -5,27 +5,13 @@
  * layer to the last; imports run the other way.
  */
 const engine = (...names) => names.map((name) => `engine/${name}`)
-const rooms = engine(
-  'rig',
-  'line',
-  'laws',
-  'characteristics',
-  'march',
-  'records',
-  'answers',
-  'exact',
-)
+const rooms = engine('rig', 'line', 'laws', 'characteristics', 'march', 'records', 'answers', 'exact')
 
 export const layers = [
   { name: 'contract', folder: 'src-main/contract', what: 'types and texts that cross a boundary', may: [] },
   { name: 'engine/rig', what: 'text to a checked rig in SI', may: ['contract'] },
   { name: 'engine/line', what: 'rig to cells: impedance, travel time, grid', may: ['contract'] },
   { name: 'engine/laws', what: 'what closes the equations at a point', may: ['contract', ...engine('line')] },
-  {
-    name: 'engine/records',
-    what: 'envelope, gauges, field, ledgers',
-    may: ['contract', ...engine('line', 'laws')],
-  },
   {
     name: 'engine/characteristics',
     what: 'the method: one step per file',
@@ -34,12 +20,17 @@ export const layers = [
   {
     name: 'engine/march',
     what: 'the time loop',
-    may: ['contract', ...engine('line', 'laws', 'characteristics', 'records')],
+    may: ['contract', ...engine('line')],
+  },
+  {
+    name: 'engine/records',
+    what: 'envelope, gauges, field, ledgers',
+    may: ['contract', ...engine('line', 'laws', 'characteristics', 'march')],
   },
   {
     name: 'engine/answers',
     what: 'ratios, fronts, margins, cautions',
-    may: ['contract', ...engine('line', 'laws', 'records', 'march')],
+    may: ['contract', ...engine('line', 'laws', 'records')],
   },
   { name: 'engine/exact', what: 'closed forms for checks', may: ['contract'] },
   { name: 'engine', what: 'a run from rig to result', may: ['contract', ...rooms] },

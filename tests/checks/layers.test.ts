@@ -12,7 +12,12 @@ async function rulesBroken(path: string, text: string): Promise<string[]> {
 
 describe('layers', () => {
   it.each([
-    ['an engine room to the service', 'src-main/engine/line/a.ts', '../../service/makeService', 'makeService'],
+    [
+      'an engine room to the service',
+      'src-main/engine/line/a.ts',
+      '../../service/makeService',
+      'makeService',
+    ],
     ['the line to the records', 'src-main/engine/line/a.ts', '../records/record', 'record'],
     ['the page to the engine', 'src-renderer/app/a.ts', '../../src-main/engine/line/makeLine', 'makeLine'],
     [

@@ -8,9 +8,15 @@ const LARGEST_FILE = 280
 
 /** Spelt in two parts, so that this file does not hold what it looks for. */
 const STRAY_WORDS = [
-  ['a place of one machine', new RegExp(['(^|[\\s"\'`(=])/(wor', 'k|far', 'm|hom', 'e|roo', 't|Use', 'rs)/'].join(''))],
+  [
+    'a place of one machine',
+    new RegExp(['(^|[\\s"\'`(=])/(wor', 'k|far', 'm|hom', 'e|roo', 't|Use', 'rs)/'].join('')),
+  ],
   ['a place of one machine', new RegExp('bash_' + 'jobs')],
-  ['a source outside the project', new RegExp('\\b(lec' + 'ture|trans' + 'cript|seed docu' + 'ment)\\b', 'i')],
+  [
+    'a source outside the project',
+    new RegExp('\\b(lec' + 'ture|trans' + 'cript|seed docu' + 'ment)\\b', 'i'),
+  ],
   ['a host of packages', new RegExp('https?://[^ "]*\\b(regis' + 'try|de' + 'b)\\.', 'i')],
   ['a resolved address', new RegExp('"resol' + 'ved":')],
 ] as const

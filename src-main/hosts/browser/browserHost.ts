@@ -19,8 +19,10 @@ if (port === null) {
   process.stderr.write('Give --port a whole number from 0 to 65535; 0 takes a free port.\n')
   process.exitCode = 2
 } else {
-  runBrowserHost({ port, bundleFolder }, (line) => process.stdout.write(`${line}\n`)).catch((error: Error) => {
-    process.stderr.write(`The page cannot be served: ${error.message}\n`)
-    process.exitCode = 1
-  })
+  runBrowserHost({ port, bundleFolder }, (line) => process.stdout.write(`${line}\n`)).catch(
+    (error: Error) => {
+      process.stderr.write(`The page cannot be served: ${error.message}\n`)
+      process.exitCode = 1
+    },
+  )
 }

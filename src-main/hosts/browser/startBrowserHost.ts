@@ -76,7 +76,11 @@ async function answerRequest(request: IncomingMessage, response: ServerResponse,
   send(response, 200, await readFile(found.file), found.contentType)
 }
 
-async function answerBridge(request: IncomingMessage, response: ServerResponse, service: Bridge): Promise<void> {
+async function answerBridge(
+  request: IncomingMessage,
+  response: ServerResponse,
+  service: Bridge,
+): Promise<void> {
   if (request.method !== 'POST') return send(response, 405, 'Only called here.')
   const body = await readBody(request, BODY_LIMIT)
   if (body === null) {

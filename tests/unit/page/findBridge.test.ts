@@ -1,7 +1,8 @@
 import { describe, expect, it, vi } from 'vitest'
 import { findBridge } from '../../../src-renderer/bridge/findBridge'
 
-const pageAt = (hash: string, more: object = {}): Window => ({ location: { hash }, ...more }) as unknown as Window
+const pageAt = (hash: string, more: object = {}): Window =>
+  ({ location: { hash }, ...more }) as unknown as Window
 const json = (value: unknown): Response => Response.json(value)
 
 describe('findBridge', () => {

@@ -137,9 +137,12 @@ describe('the browser host', () => {
     const announced = await ask('POST', '/bridge', { ...ownPage(), 'Content-Length': 1e9 }).catch(() => null)
     expect(announced?.status ?? 413).toBe(413)
     const large = 'x'.repeat(2 * BRIDGE_TEXT_LIMIT + 2000)
-    const streamed = await ask('POST', '/bridge', { ...ownPage(), 'Transfer-Encoding': 'chunked' }, large).catch(
-      () => null,
-    )
+    const streamed = await ask(
+      'POST',
+      '/bridge',
+      { ...ownPage(), 'Transfer-Encoding': 'chunked' },
+      large,
+    ).catch(() => null)
     expect(streamed?.status ?? 413).toBe(413)
     expect((await ask('POST', '/bridge', ownPage(), aboutCall)).status).toBe(200)
   })

@@ -1,6 +1,10 @@
 import { expect, it, vi } from 'vitest'
 
-const exposed = vi.hoisted(() => ({ names: [] as string[], values: [] as unknown[], sent: [] as unknown[][] }))
+const exposed = vi.hoisted(() => ({
+  names: [] as string[],
+  values: [] as unknown[],
+  sent: [] as unknown[][],
+}))
 
 vi.mock('electron', () => ({
   contextBridge: {
