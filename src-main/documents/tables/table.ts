@@ -1,0 +1,58 @@
+import { chooseUnit } from '../format/chooseUnit'
+import { formatMargin } from '../format/formatMargin'
+import { formatNumber } from '../format/formatNumber'
+import type { Quantity } from '../format/quantity'
+
+/** A table for people, ready for a page or a terminal. */
+export interface Table {
+  headings: string[]
+  /** True where a column holds numbers and is set flush right. */
+  numeric: boolean[]
+  rows: string[][]
+  /** True for a row that must not be missed, such as a negative margin. */
+  alarm: boolean[]
+}
+
+/** One column: what stands over it, what it measures, and where its values come from. */
+export interface Column<Row> {
+  heading: string
+  measures: Quantity | 'margin' | 'text'
+  value(row: Row): string | number | null
+}
+
+/**
+ * Lays out a table: each column gets one unit, which its heading names.
+ *
+ * @param columns - in order from the left
+ * @param rows - what the columns take their values from, SI
+ * @param isAlarm - tells the rows that must not be missed
+ * @returns headings and cells as text; an absent value reads `none`
+ */
+export function makeTable<Row>(
+  columns: Column<Row>[],
+  rows: Row[],
+  isAlarm: (row: Row) => boolean = () => false,
+): Table {
+  const laid = columns.map((column) => layColumn(column, rows))
+  return {
+    headings: laid.map((column) => column.heading),
+    numeric: columns.map((column) => column.measures !== 'text'),
+    rows: rows.map((_row, i) => laid.map((column) => column.cells[i])),
+    alarm: rows.map(isAlarm),
+  }
+}
+
+function layColumn<Row>({ heading, measures, value }: Column<Row>, rows: Row[]) {
+  const values = rows.map(value)
+  if (measures === 'text') return { heading, cells: values.map((text) => String(text ?? 'none')) }
+  if (measures === 'margin')
+    return { heading, cells: values.map((margin) => formatMargin(margin as number | null)) }
+  const unit = chooseUnit(
+    measures,
+    values.filter((number) => typeof number === 'number'),
+  )
+  return {
+    heading: unit.name === '' ? heading : `${heading} [${unit.name}]`,
+    cells: values.map((number) => (typeof number === 'number' ? formatNumber(number / unit.size) : 'none')),
+  }
+}
