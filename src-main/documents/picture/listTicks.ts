@@ -9,7 +9,7 @@
 export function listTicks(from: number, to: number, count: number): number[] {
   const rough = (to - from) / count
   const power = 10 ** Math.floor(Math.log10(rough))
-  const step = [1, 2, 5].map((n) => n * power).find((size) => size >= rough) ?? 10 * power
+  const step = [1, 2, 5].map((n) => n * power).find((size) => size >= rough * (1 - 1e-9)) ?? 10 * power
   const ticks: number[] = []
   // Adding zero turns a negative zero into a plain one.
   for (let n = Math.ceil(from / step - 1e-9); n * step <= to + step * 1e-9; n++) ticks.push(n * step + 0)
