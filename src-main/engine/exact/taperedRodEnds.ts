@@ -1,0 +1,2 @@
+/** What holds the ends of a tapered rod: nothing, or one of them. */
+export type TaperedRodEnds = 'free' | 'large-fixed' | 'small-fixed'
