@@ -1,28 +1,28 @@
 import { flushDelayLine } from './delayLine'
-import { f, g, high, highStep, low, lowStep, enterWorkspace, WIDENING } from './gradedWorkspace'
-import { flushGraded, stepGraded } from './stepGraded'
+import { gradedKernel } from './gradedKernel'
 import type { LiveBlock, WaveRun } from './waveRun'
 
 /** Steps between two sweeps for subnormal numbers in graded blocks. */
 const FLUSH_EVERY = 64
 
 /**
- * Marches steps from..to-1 in place: scatter at every node, then shift by one cell.
+ * Marches steps from..to-1 in place: the laws at the nodes, then scatter and shift inside blocks.
  *
  * A wave cannot cross a delay line in fewer steps than it has cells, so without graded blocks each
- * node takes as many steps in one go as the shortest line has cells.
+ * node takes as many steps in one go as the shortest line has cells. With graded blocks the nodes
+ * go step by step and the insides of the blocks in pairs of steps.
  */
 export function advanceWaves(run: WaveRun, from: number, to: number): void {
-  enterWorkspace(run.graded)
+  gradedKernel.enter(run.graded)
   const graded = run.blocks.filter((block) => block.delay === null)
   const delays = run.blocks.filter((block) => block.delay !== null)
-  const stride = graded.length > 0 ? 1 : Math.min(...delays.map((block) => block.cells))
-  const { nodes } = run
-  for (let k = from; k < to; k += stride) {
-    const end = Math.min(to, k + stride)
-    for (let i = 0; i < graded.length; i++) scatterGraded(graded[i], k)
-    for (let i = 0; i < nodes.length; i++) nodes[i].law.advance(k, end)
-    for (let i = 0; i < graded.length; i++) receiveGraded(graded[i], k)
+  if (graded.length === 0) {
+    const stride = Math.min(...delays.map((block) => block.cells))
+    for (let k = from; k < to; k += stride) closeNodes(run, k, Math.min(to, k + stride))
+  } else {
+    let k = from
+    for (; k + 2 <= to; k += 2) advancePair(run, graded, k)
+    if (k < to) advanceOne(run, graded, k)
   }
   for (const block of delays) {
     flushDelayLine(block.delay!.line, from, to)
@@ -30,47 +30,71 @@ export function advanceWaves(run: WaveRun, from: number, to: number): void {
   }
 }
 
-function scatterGraded(block: LiveBlock, k: number): void {
-  const { slot, cells } = block
-  block.left.arriving[k] = g[slot]
-  block.right.arriving[k] = stepGraded(slot, slot + cells - 1, k)
-  if (k % FLUSH_EVERY === 0) flushGraded(slot, slot + cells - 1)
+function closeNodes(run: WaveRun, from: number, to: number): void {
+  const { nodes } = run
+  for (let i = 0; i < nodes.length; i++) nodes[i].law.advance(from, to)
 }
 
-function receiveGraded(block: LiveBlock, k: number): void {
+function advanceOne(run: WaveRun, graded: readonly LiveBlock[], k: number): void {
+  for (const block of graded) arrive(block, k)
+  closeNodes(run, k, k + 1)
+  for (const block of graded) stepOne(block, k)
+}
+
+/** Two steps: blocks of one cell, which have no inside, take them one by one. */
+function advancePair(run: WaveRun, graded: readonly LiveBlock[], k: number): void {
+  for (const block of graded) arrive(block, k)
+  closeNodes(run, k, k + 1)
+  for (const block of graded) {
+    const { slot, cells, left, right } = block
+    if (cells === 1) {
+      stepOne(block, k)
+      arrive(block, k + 1)
+    } else {
+      gradedKernel.stepPair(slot, slot + cells - 1, k, left.leaving[k], right.leaving[k])
+      left.arriving[k + 1] = gradedKernel.pairToLeft
+      right.arriving[k + 1] = gradedKernel.pairToRight
+    }
+  }
+  closeNodes(run, k + 1, k + 2)
+  for (const block of graded) {
+    if (block.cells > 1) widenFaces(block, k)
+    receive(block, k + 1)
+  }
+}
+
+function stepOne(block: LiveBlock, k: number): void {
+  gradedKernel.step(block.slot, block.slot + block.cells - 1, k)
+  receive(block, k)
+}
+
+/** Notes what arrives at a block's faces at step k, and what its probes see, before the step is made. */
+function arrive(block: LiveBlock, k: number): void {
   const { slot, cells, left, right, probes } = block
-  f[slot] = left.leaving[k]
-  g[slot + cells - 1] = right.leaving[k]
-  widen(slot, left.arriving[k] + left.leaving[k], k)
-  widen(slot + cells, right.arriving[k] + right.leaving[k], k)
+  const { f, g } = gradedKernel
+  left.arriving[k] = g[slot]
+  right.arriving[k] = f[slot + cells - 1]
   for (let i = 0; i < probes.length; i++) {
     const { position, force, velocity } = probes[i]
-    const node = evaluateInner(block, position)
-    force[k] = node.force
-    velocity[k] = node.velocity
+    const Y = 2 / (block.impedance[position - 1] + block.impedance[position])
+    const fIn = f[slot + position - 1]
+    const gIn = g[slot + position]
+    force[k] = 2 * gIn + block.impedance[position] * Y * (fIn - gIn)
+    velocity[k] = Y * (gIn - fIn)
   }
+  if (k % FLUSH_EVERY < 2) gradedKernel.flush(slot, slot + cells - 1)
 }
 
-function widen(slot: number, F: number, k: number): void {
-  if (F > high[slot]) {
-    high[slot] = F * WIDENING
-    highStep[slot] = k
-  } else if (F < low[slot]) {
-    low[slot] = F * WIDENING
-    lowStep[slot] = k
-  }
+/** Puts the waves that its nodes sent at step k into a block, once its inside has made that step. */
+function receive(block: LiveBlock, k: number): void {
+  const { slot, cells, left, right } = block
+  gradedKernel.f[slot] = left.leaving[k]
+  gradedKernel.g[slot + cells - 1] = right.leaving[k]
+  widenFaces(block, k)
 }
 
-/**
- * Force and velocity at an inner position of a graded block after its latest step, from the waves
- * that leave it: `F = 2 (Z1 f + Z2 g)/(Z1 + Z2)`, `v = 2 (g - f)/(Z1 + Z2)`.
- *
- * @param position 1..cells-1
- */
-export function evaluateInner(block: LiveBlock, position: number): { force: number; velocity: number } {
-  const i = block.slot + position
-  const Z1 = block.impedance[position - 1]
-  const Z2 = block.impedance[position]
-  const Y = 2 / (Z1 + Z2)
-  return { force: Y * (Z1 * f[i] + Z2 * g[i - 1]), velocity: Y * (g[i - 1] - f[i]) }
+function widenFaces(block: LiveBlock, k: number): void {
+  const { slot, cells, left, right } = block
+  gradedKernel.widen(slot, left.arriving[k] + left.leaving[k], k)
+  gradedKernel.widen(slot + cells, right.arriving[k] + right.leaving[k], k)
 }

@@ -1,15 +1,8 @@
 import type { DelayLine } from './delayLine'
-import { WIDENING } from './gradedWorkspace'
+import { type Extremes, TILE, tileKernel } from './tileKernel'
 
-/** Side of a tile of (position, step). */
-const TILE = 16
-
-/** Envelope of a delay line's force at each of its positions, shape (cells + 1). */
-export interface DelayEnvelope {
-  high: Float64Array
-  low: Float64Array
-  highStep: Int32Array
-  lowStep: Int32Array
+/** Envelope of a delay line's force at each of its positions, kept as it is marched. */
+export interface DelayEnvelope extends Extremes {
   /** Takes in all steps before `to`; whole tiles of steps unless `to` is the end of the run. */
   advance(to: number): void
 }
@@ -27,10 +20,12 @@ export function makeDelayEnvelope(line: DelayLine, end: number): DelayEnvelope {
   const { cells: n, right, left } = line
   const positions = n + 1
   const tiles = Math.ceil(positions / TILE)
-  const high = new Float64Array(positions)
-  const low = new Float64Array(positions)
-  const highStep = new Int32Array(positions)
-  const lowStep = new Int32Array(positions)
+  const envelope = {
+    high: new Float64Array(positions),
+    low: new Float64Array(positions),
+    highStep: new Int32Array(positions),
+    lowStep: new Int32Array(positions),
+  }
   // Least of `high` and largest of `low` over each tile of positions.
   const leastHigh = new Float64Array(tiles)
   const largestLow = new Float64Array(tiles)
@@ -76,31 +71,11 @@ export function makeDelayEnvelope(line: DelayLine, end: number): DelayEnvelope {
     leftLow[j] = bottom
   }
 
-  function scanTile(p0: number, k0: number, k1: number): void {
-    const p1 = Math.min(positions, p0 + TILE)
-    let least = Infinity
-    let largest = -Infinity
-    for (let p = p0; p < p1; p++) {
-      const r = n - p
-      let top = high[p]
-      let bottom = low[p]
-      for (let k = k0; k < k1; k++) {
-        const F = right[k + r] + left[k + p]
-        if (F > top) {
-          top = F * WIDENING
-          highStep[p] = k
-        } else if (F < bottom) {
-          bottom = F * WIDENING
-          lowStep[p] = k
-        }
-      }
-      high[p] = top
-      low[p] = bottom
-      if (top < least) least = top
-      if (bottom > largest) largest = bottom
-    }
-    leastHigh[p0 / TILE] = least
-    largestLow[p0 / TILE] = largest
+  function scanTile(tile: number, k0: number, k1: number): void {
+    const p0 = tile * TILE
+    tileKernel.scan(line, p0, Math.min(positions, p0 + TILE), k0, k1, envelope)
+    leastHigh[tile] = tileKernel.leastHigh
+    largestLow[tile] = tileKernel.largestLow
   }
 
   function scanRow(row: number, to: number): void {
@@ -112,15 +87,12 @@ export function makeDelayEnvelope(line: DelayLine, end: number): DelayEnvelope {
     for (let tile = 0; tile < tiles; tile++) {
       const top = rightHigh[base - tile] + leftHigh[row + tile]
       const bottom = rightLow[base - tile] + leftLow[row + tile]
-      if (top > leastHigh[tile] || bottom < largestLow[tile]) scanTile(tile * TILE, k0, to)
+      if (top > leastHigh[tile] || bottom < largestLow[tile]) scanTile(tile, k0, to)
     }
   }
 
   return {
-    high,
-    low,
-    highStep,
-    lowStep,
+    ...envelope,
     advance(to) {
       while (done < to && (done + TILE <= to || to === end)) {
         const until = Math.min(done + TILE, to)

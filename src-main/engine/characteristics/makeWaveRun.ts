@@ -4,7 +4,7 @@ import type { Line } from '../line/line'
 import { makeBlocks, type Block } from './block'
 import { makeDelayEnvelope } from './delayEnvelope'
 import { makeDelayLine } from './delayLine'
-import { enterWorkspace, f, g, makeGradedState, T } from './gradedWorkspace'
+import { gradedKernel } from './gradedKernel'
 import type { LiveBlock, WaveRun } from './waveRun'
 
 /**
@@ -16,10 +16,9 @@ import type { LiveBlock, WaveRun } from './waveRun'
 export function makeWaveRun(line: Line): WaveRun {
   const plain = (node: number) => line.nodes[node].kind === 'step' && line.nodes[node].loads.length === 0
   const drafts = makeBlocks(line.spans, plain)
-  const graded = makeGradedState(
-    drafts.reduce((sum, block) => sum + (block.kind === 'graded' ? block.cells + 1 : 0), 0),
-  )
-  enterWorkspace(graded)
+  const size = drafts.reduce((sum, block) => sum + (block.kind === 'graded' ? block.cells + 1 : 0), 0)
+  const graded = { size, saved: [] }
+  gradedKernel.enter(graded)
   let slot = 0
   const blocks = drafts.map((draft) => {
     if (draft.kind === 'delay') return makeDelayBlock(line, draft)
@@ -51,6 +50,7 @@ function makeDelayBlock(line: Line, draft: Block): LiveBlock {
 
 function makeGradedBlock(line: Line, draft: Block, slot: number): LiveBlock {
   const { cells, impedance: Z, firstSpan, lastSpan, spanStart } = draft
+  const { f, g, T } = gradedKernel
   for (let i = 1; i < cells; i++) T[slot + i] = (2 * Z[i]) / (Z[i - 1] + Z[i])
   for (let span = firstSpan; span <= lastSpan; span++) {
     const start = spanStart[span - firstSpan]

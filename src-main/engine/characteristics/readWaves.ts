@@ -1,5 +1,5 @@
-import { evaluateInner } from './advanceWaves'
-import { enterWorkspace, f, g, high, highStep, low, lowStep, WIDENING } from './gradedWorkspace'
+import { gradedKernel } from './gradedKernel'
+import { WIDENING } from './widening'
 import type { LiveBlock, WaveRun } from './waveRun'
 
 /** Energy and momentum in a block between two steps. */
@@ -34,21 +34,22 @@ export function sumBlock(run: WaveRun, block: LiveBlock, k: number, frame: numbe
       const gi = left[k + i + 1]
       const v = gi - fi + Z * frame
       kinetic += v * v
-      strain += (fi + gi) ** 2
+      strain += (fi + gi) * (fi + gi)
       momentum += gi - fi
     }
     kinetic /= Z
     strain /= Z
     mass = n * Z
   } else {
-    enterWorkspace(run.graded)
+    gradedKernel.enter(run.graded)
+    const { f, g } = gradedKernel
     for (let i = 0; i < n; i++) {
       const Z = impedance[i]
       const fi = f[slot + i]
       const gi = g[slot + i]
       const v = gi - fi + Z * frame
       kinetic += (v * v) / Z
-      strain += (fi + gi) ** 2 / Z
+      strain += ((fi + gi) * (fi + gi)) / Z
       momentum += gi - fi
       mass += Z
     }
@@ -65,7 +66,18 @@ export function readForce(block: LiveBlock, position: number, k: number): number
   if (delay) return delay.line.right[k - position + cells] + delay.line.left[k + position]
   if (position === 0) return left.arriving[k] + left.leaving[k]
   if (position === cells) return right.arriving[k] + right.leaving[k]
-  return evaluateInner(block, position).force
+  return evaluateInner(block, position)
+}
+
+/**
+ * Force inside a graded block after its latest step, from the waves that left the node:
+ * `F = 2 (Z1 f + Z2 g)/(Z1 + Z2)`.
+ */
+function evaluateInner(block: LiveBlock, position: number): number {
+  const i = block.slot + position
+  const Z1 = block.impedance[position - 1]
+  const Z2 = block.impedance[position]
+  return (2 * (Z1 * gradedKernel.f[i] + Z2 * gradedKernel.g[i - 1])) / (Z1 + Z2)
 }
 
 /** Largest tension and compression of a block at each position, with the steps, shape (cells + 1). */
@@ -78,7 +90,8 @@ export function readEnvelope(
     const { envelope } = block.delay
     return { ...envelope, high: narrow(envelope.high), low: narrow(envelope.low) }
   }
-  enterWorkspace(run.graded)
+  gradedKernel.enter(run.graded)
+  const { high, low, highStep, lowStep } = gradedKernel
   const cut = <A extends Float64Array | Int32Array>(array: A) =>
     array.slice(block.slot, block.slot + block.cells + 1) as A
   return { high: narrow(cut(high)), low: narrow(cut(low)), highStep: cut(highStep), lowStep: cut(lowStep) }

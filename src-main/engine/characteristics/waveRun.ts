@@ -5,7 +5,7 @@ import type { Body, NodeLaw } from '../laws/side'
 import type { Block } from './block'
 import type { DelayEnvelope } from './delayEnvelope'
 import type { DelayLine } from './delayLine'
-import type { GradedState } from './gradedWorkspace'
+import type { GradedState } from './gradedKernel'
 
 /** The history of one inner position of a graded block, shape (steps + 1) each. */
 export interface Probe {
@@ -16,12 +16,12 @@ export interface Probe {
   velocity: Float64Array
 }
 
-/** A block with its state: a delay line, or slots in the graded workspace. */
+/** A block with its state: a delay line, or slots in the graded kernel. */
 export interface LiveBlock extends Block {
   left: Port
   right: Port
   delay: { line: DelayLine; envelope: DelayEnvelope } | null
-  /** Slot of its first cell in the workspace; -1 for a delay line. */
+  /** Slot of its first cell in the graded kernel; -1 for a delay line. */
   slot: number
   probes: Probe[]
 }
