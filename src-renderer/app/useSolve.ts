@@ -1,6 +1,9 @@
 import { ref, shallowRef, type Ref, type ShallowRef } from 'vue'
 import type { Bridge, SolveAnswer } from '../../src-main/contract/bridge'
 
+/** Keeps a byte-order mark, so that the host sees the file as it is. */
+const UTF8 = new TextDecoder('utf-8', { ignoreBOM: true })
+
 export interface Solve {
   /** Name of the rig file that was opened last; empty before. */
   fileName: Ref<string>
@@ -33,7 +36,7 @@ export function useSolve(bridge: Bridge): Solve {
     trouble.value = ''
     busy.value = true
     try {
-      const given = await bridge.solve(await file.text())
+      const given = await bridge.solve(UTF8.decode(await file.arrayBuffer()))
       if (mine === latest) answer.value = given
     } catch (error) {
       if (mine === latest) trouble.value = error instanceof Error ? error.message : String(error)
