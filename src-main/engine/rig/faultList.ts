@@ -1,0 +1,74 @@
+import type { Fault } from '../../contract/fault'
+import type { FaultText } from './faultText'
+import { faultText } from './faultText'
+import { LIMITS } from './limits'
+import type { Place } from './place'
+import { formatPlace } from './place'
+
+/** Collects the faults of one file while its parts are read in any order. */
+export interface FaultList {
+  /**
+   * Adds one fault.
+   * @param place where it is
+   * @param text from the table of texts
+   */
+  add(place: Place, text: FaultText): void
+  /** True where nothing has been added. */
+  readonly empty: boolean
+  /**
+   * Lists the faults in the order in which their places stand in the file.
+   * @param document the file as it was read
+   */
+  inOrder(document: unknown): Fault[]
+}
+
+/** Makes an empty list of faults. */
+export function makeFaultList(): FaultList {
+  const items: { place: Place; text: FaultText }[] = []
+  let surplus = 0
+  return {
+    add(place, text) {
+      if (items.length < LIMITS.faults) items.push({ place, text })
+      else surplus++
+    },
+    get empty() {
+      return items.length === 0
+    },
+    inOrder(document) {
+      const ranked = items.map((item) => ({ ...item, rank: rankOf(item.place, document) }))
+      ranked.sort((a, b) => compareRanks(a.rank, b.rank))
+      const faults: Fault[] = ranked.map(({ place, text }) => ({ ...textOf(text), path: formatPlace(place) }))
+      if (surplus > 0) faults.push({ ...textOf(faultText.moreFaults(surplus)), path: '' })
+      return faults
+    },
+  }
+}
+
+function textOf({ code, message }: FaultText): FaultText {
+  return { code, message }
+}
+
+/** Positions of the parts of a place among their neighbours; a missing key stands after those that are there. */
+function rankOf(place: Place, document: unknown): number[] {
+  const rank: number[] = []
+  let value: unknown = document
+  for (const part of place) {
+    if (typeof part === 'number') {
+      rank.push(part)
+      value = Array.isArray(value) ? value[part] : undefined
+    } else {
+      const keys = typeof value === 'object' && value !== null ? Object.keys(value) : []
+      const index = keys.indexOf(part)
+      rank.push(index === -1 ? keys.length : index)
+      value = index === -1 ? undefined : (value as Record<string, unknown>)[part]
+    }
+  }
+  return rank
+}
+
+function compareRanks(a: number[], b: number[]): number {
+  for (let i = 0; i < Math.min(a.length, b.length); i++) {
+    if (a[i] !== b[i]) return a[i] - b[i]
+  }
+  return a.length - b.length
+}
