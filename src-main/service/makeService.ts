@@ -1,6 +1,7 @@
 import type { Bridge } from '../contract/bridge'
 import { NOTICE } from '../contract/notice'
 import { SOFTWARE } from '../contract/software'
+import { solveText } from './solveText'
 
 /**
  * Makes what stands behind the bridge of every host.
@@ -10,15 +11,16 @@ import { SOFTWARE } from '../contract/software'
 export function makeService(): Bridge {
   return {
     about: async () => ({ ...SOFTWARE, notice: NOTICE }),
-    solve: async () => ({
-      status: 'refused',
-      faults: [
-        {
-          code: 'not-computed-yet',
-          path: '',
-          message: 'The window does not solve rigs yet; use `barwright solve` on the command line.',
-        },
-      ],
-    }),
+    solve: async (text) => {
+      const outcome = await solveText(text)
+      switch (outcome.status) {
+        case 'broken':
+          throw new Error(`the numbers stopped being finite after step ${outcome.step} of ${outcome.steps}`)
+        case 'stopped':
+          throw new Error('the solve was stopped')
+        default:
+          return outcome
+      }
+    },
   }
 }

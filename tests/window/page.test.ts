@@ -5,6 +5,7 @@ import { afterAll, beforeAll, beforeEach, afterEach, describe, expect, it } from
 import { NOTICE } from '../../src-main/contract/notice'
 import { SOFTWARE } from '../../src-main/contract/software'
 import { startBrowserHost, type BrowserHost } from '../../src-main/hosts/browser/startBrowserHost'
+import { PIN_RIG } from '../unit/service/pinRig'
 import { BROWSER_FLAGS, findBrowser, HOW_TO_GET_A_BROWSER } from './findBrowser'
 
 const executablePath = findBrowser()
@@ -83,6 +84,34 @@ describe.skipIf(!executablePath || !existsSync(bundleFolder))(`the page in a bro
     expect(await page.getByRole('alert').textContent()).toContain('Wrong token')
   })
 
+  it('opens a rig file and shows its governing margin and peaks', async () => {
+    await page.goto(host.address)
+    await openRig(page, JSON.stringify(PIN_RIG))
+    await page.getByRole('heading', { name: PIN_RIG.title }).waitFor()
+    expect(await page.getByText(/^[+−]\d+\.\d\d$/).count()).toBeGreaterThan(1)
+    expect(await page.getByRole('row', { name: /^pin 1 (tension|compression)/ }).count()).toBe(2)
+    expect(await page.getByRole('row', { name: /^pin 2 (tension|compression)/ }).count()).toBe(2)
+    expect(complaints).toEqual([])
+  })
+
+  it('says every reason why a rig is refused, each with its place', async () => {
+    await page.goto(host.address)
+    await openRig(page, JSON.stringify({ ...PIN_RIG, run: { duration: '1 MPa', cell: '0 mm' } }))
+    const alert = page.getByRole('alert')
+    await alert.waitFor()
+    expect(await alert.getByRole('listitem').count()).toBe(2)
+    expect(await alert.textContent()).toMatch(/run\.duration: .+run\.cell: /)
+  })
+
+  it('shows a hostile title as the text that it is', async () => {
+    await page.goto(host.address)
+    const title = '<img src=x onerror="window.titleRan = true"><script>window.titleRan = true</script>'
+    await openRig(page, JSON.stringify({ ...PIN_RIG, title }))
+    await page.getByRole('heading', { name: title }).waitFor()
+    expect(await page.evaluate(() => 'titleRan' in window)).toBe(false)
+    expect(complaints).toEqual([])
+  })
+
   it('runs no script that it did not bring', async () => {
     await page.goto(host.address)
     await page.getByText(SOFTWARE.version, { exact: true }).waitFor()
@@ -140,3 +169,9 @@ describe.skipIf(!executablePath || !existsSync(bundleFolder))(`the page in a bro
     await outer.close()
   })
 })
+
+async function openRig(page: Page, text: string): Promise<void> {
+  await page
+    .getByLabel('Open a rig file')
+    .setInputFiles({ name: 'made.rig.json', mimeType: 'application/json', buffer: Buffer.from(text) })
+}
