@@ -5,7 +5,7 @@ import { makeBlocks, type Block } from './block'
 import { makeDelayEnvelope } from './delayEnvelope'
 import { makeDelayLine } from './delayLine'
 import { gradedKernel } from './gradedKernel'
-import type { LiveBlock, WaveRun } from './waveRun'
+import { LiveBlock, type WaveRun } from './waveRun'
 
 /**
  * Sets up a line for the method of characteristics: blocks with their initial waves, and the laws
@@ -38,14 +38,12 @@ function makeDelayBlock(line: Line, draft: Block): LiveBlock {
     if (p > 0) delay.right[n - p] = (force - Z * velocity) / 2
     if (p < n) delay.left[p] = (force + Z * velocity) / 2
   }
-  return {
-    ...draft,
-    left: { impedance: Z, arriving: delay.left, leaving: delay.right, leavingOffset: n },
-    right: { impedance: Z, arriving: delay.right, leaving: delay.left, leavingOffset: n },
-    delay: { line: delay, envelope: makeDelayEnvelope(delay, line.steps + 1) },
-    slot: -1,
-    probes: [],
-  }
+  const left = { impedance: Z, arriving: delay.left, leaving: delay.right, leavingOffset: n }
+  const right = { impedance: Z, arriving: delay.right, leaving: delay.left, leavingOffset: n }
+  return new LiveBlock(draft, left, right, -1, {
+    line: delay,
+    envelope: makeDelayEnvelope(delay, line.steps + 1),
+  })
 }
 
 function makeGradedBlock(line: Line, draft: Block, slot: number): LiveBlock {
@@ -67,5 +65,5 @@ function makeGradedBlock(line: Line, draft: Block, slot: number): LiveBlock {
     leaving: new Float64Array(line.steps + 1),
     leavingOffset: 0,
   })
-  return { ...draft, left: makePort(Z[0]), right: makePort(Z[cells - 1]), delay: null, slot, probes: [] }
+  return new LiveBlock(draft, makePort(Z[0]), makePort(Z[cells - 1]), slot, null)
 }

@@ -16,14 +16,39 @@ export interface Probe {
   velocity: Float64Array
 }
 
-/** A block with its state: a delay line, or slots in the graded kernel. */
-export interface LiveBlock extends Block {
-  left: Port
-  right: Port
-  delay: { line: DelayLine; envelope: DelayEnvelope } | null
-  /** Slot of its first cell in the graded kernel; -1 for a delay line. */
-  slot: number
-  probes: Probe[]
+/** A block with its state: a delay line, or slots in the graded kernel. A class, so that all have one shape. */
+export class LiveBlock implements Block {
+  readonly kind: Block['kind']
+  readonly bar: number
+  readonly firstSpan: number
+  readonly lastSpan: number
+  readonly cells: number
+  readonly spanStart: number[]
+  readonly impedance: Float64Array
+  readonly leftNode: number
+  readonly rightNode: number
+  readonly probes: Probe[] = []
+
+  /**
+   * @param slot of its first cell in the graded kernel; -1 for a delay line
+   */
+  constructor(
+    block: Block,
+    readonly left: Port,
+    readonly right: Port,
+    readonly slot: number,
+    readonly delay: { line: DelayLine; envelope: DelayEnvelope } | null,
+  ) {
+    this.kind = block.kind
+    this.bar = block.bar
+    this.firstSpan = block.firstSpan
+    this.lastSpan = block.lastSpan
+    this.cells = block.cells
+    this.spanStart = block.spanStart
+    this.impedance = block.impedance
+    this.leftNode = block.leftNode
+    this.rightNode = block.rightNode
+  }
 }
 
 /** A node with a law of its own between two blocks, or at an end. */

@@ -1,0 +1,2 @@
+export { marchRig } from '../unit/engine/march'
+export * from './rigs'
