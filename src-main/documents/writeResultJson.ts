@@ -1,6 +1,8 @@
 import type { Result } from '../contract/result'
 import { RESULT_SHAPE, type ShapeNode } from './resultShape'
 
+const VALUES_PER_PART = 10_000
+
 /**
  * Writes a result as the text of `result.json`: keys in one order, numbers in full, arrays of numbers on
  * one line each, one newline at the end.
@@ -15,7 +17,9 @@ export function* writeResultJson(result: Result): Generator<string> {
 }
 
 function* writeValue(value: unknown, shape: ShapeNode, indent: string, path: string): Generator<string> {
-  if (isCompact(value, indent)) {
+  if (isList(value) && isCompact(value, indent)) {
+    yield* writeList(value, path)
+  } else if (isCompact(value, indent)) {
     yield writeCompact(value, shape, path)
   } else if (isList(value)) {
     yield* writeItems('[', ']', listItems(value, shape, path), indent)
@@ -77,13 +81,20 @@ function isCompact(value: unknown, indent: string): boolean {
 function writeCompact(value: unknown, shape: ShapeNode, path: string): string {
   if (typeof value === 'number') return writeNumber(value, path)
   if (!isObject(value)) return JSON.stringify(value)
-  if (isList(value)) {
-    const texts = new Array<string>(value.length)
-    for (let i = 0; i < value.length; i++) texts[i] = writeCompact(value[i], null, path)
-    return `[${texts.join(',')}]`
-  }
   const members = [...objectItems(value, shape, path)]
   return `{ ${members.map((item) => item.label + writeCompact(item.value, item.shape, item.path)).join(', ')} }`
+}
+
+/** A list of plain values on one line, in parts short enough that a run can be stopped between them. */
+function* writeList(list: ArrayLike<unknown>, path: string): Generator<string> {
+  let before = '['
+  for (let from = 0; from < list.length; from += VALUES_PER_PART) {
+    const size = Math.min(VALUES_PER_PART, list.length - from)
+    const texts = Array.from({ length: size }, (_none, i) => writeCompact(list[from + i], null, path))
+    yield before + texts.join(',')
+    before = ','
+  }
+  yield list.length === 0 ? '[]' : ']'
 }
 
 function writeNumber(value: number, path: string): string {
