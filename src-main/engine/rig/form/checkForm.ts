@@ -1,4 +1,4 @@
-import { z } from 'zod'
+import { type z } from 'zod'
 import type { FaultList } from '../faultList'
 import { faultText } from '../faultText'
 import type { FaultText } from '../faultText'
@@ -6,6 +6,7 @@ import { DIMENSIONS } from '../formula/dimension'
 import type { DimensionName } from '../formula/dimension'
 import { nearestName } from '../nearestName'
 import type { Place } from '../place'
+import { quote } from '../showValue'
 import type { QuantityParameters } from './fields'
 import type { Loose } from './loose'
 import type { RigForm } from './rigForm'
@@ -59,7 +60,8 @@ function report(issue: Issue, parent: Place, document: unknown, faults: FaultLis
     }
   }
   const value = valueAt(document, place)
-  faults.add(place, value === undefined ? faultText.missing(expectedOf(issue)) : textOf(issue, value))
+  const reported = Number.isNaN(value)
+  if (!reported) faults.add(place, value === undefined ? faultText.missing(expectedOf(issue)) : textOf(issue, value))
   takeOut(document, place)
 }
 
@@ -68,9 +70,7 @@ function expectedOf(issue: Issue): string {
   if (issue.code === 'custom') return describeQuantity(issue.params as unknown as QuantityParameters)
   if (issue.code === 'invalid_type') return TYPES[issue.expected] ?? issue.expected
   if (issue.code === 'invalid_value')
-    return choicesOf(issue.values)
-      .map((it) => `"${it}"`)
-      .join(' or ')
+    return issue.values.map((it) => (typeof it === 'string' ? quote(it) : String(it))).join(' or ')
   if (issue.code !== 'invalid_union') return 'a value'
   if ('options' in issue && Array.isArray(issue.options))
     return `one of ${choicesOf(issue.options).join(', ')}`
@@ -105,7 +105,7 @@ function textOf(issue: Issue, value: unknown): FaultText {
     case 'too_small':
     case 'too_big': {
       const limit = issue.code === 'too_small' ? `at least ${issue.minimum}` : `at most ${issue.maximum}`
-      if (Array.isArray(value)) return faultText.wrongCount(`${limit} values in the list`, value.length)
+      if (Array.isArray(value)) return faultText.wrongCount(`${limit} in the list`, value.length)
       return faultText.outside(String(value), limit)
     }
     default:
