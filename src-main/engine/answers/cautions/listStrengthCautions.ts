@@ -1,0 +1,116 @@
+import type { Caution, SectionPeaks } from '../../../contract/result'
+import type { Section } from '../../../contract/rig'
+import type { Line } from '../../line/line'
+import { describePlace } from '../describePlace'
+import { describeQuantity } from './describeQuantity'
+import { joinPlaces } from './joinPlaces'
+
+/** Strain over which small-strain theory is off by more than about its own percent: common practice. */
+const LARGE_STRAIN = 0.02
+
+interface Row {
+  place: string
+  source: Section
+  peaks: SectionPeaks
+}
+
+/**
+ * Cautions about strength: negative margins, stress over yield, large strain, missing allowables.
+ *
+ * @param line the cut line
+ * @param sections the peaks of every section, in order
+ */
+export function listStrengthCautions(line: Line, sections: SectionPeaks[]): Caution[] {
+  const sources = line.rig.bars.flatMap((bar, b) =>
+    bar.sections.map((source, s) => ({ source, place: describePlace(line.rig, b, s) })),
+  )
+  const rows = sections.map((peaks, i) => ({ ...sources[i], peaks }))
+  return [
+    ...listNegativeMargins(rows, line.rig.factorOfSafety),
+    ...listOverYield(rows),
+    ...(line.rig.run.finiteStrain ? [] : listLargeStrain(rows)),
+    ...listNoAllowable(rows),
+  ]
+}
+
+function listNegativeMargins(rows: Row[], factor: number): Caution[] {
+  const senses = rows.flatMap(({ place, peaks }) =>
+    (['tension', 'compression'] as const).map((sense) => ({ place, sense, ...peaks[sense] })),
+  )
+  const negative = senses.filter(({ margin }) => margin !== null && margin < 0)
+  if (negative.length === 0) return []
+  const worst = negative.reduce((one, other) => (other.margin! < one.margin! ? other : one))
+  return [
+    {
+      code: 'negative-margin',
+      message:
+        `The margin is negative: at worst ${Number(worst.margin!.toPrecision(3))} in ${worst.place} (${worst.sense}), ` +
+        `${describeQuantity(Math.abs(worst.local), 'stress')} against ${describeQuantity(worst.allowable!, 'stress')} ` +
+        `allowed, with a factor of safety of ${factor}. The part does not hold by these numbers.`,
+      where: joinPlaces(negative.map(({ place }) => place)),
+    },
+  ]
+}
+
+function listOverYield(rows: Row[]): Caution[] {
+  const over = rows
+    .map(({ place, source, peaks: { tension, compression } }) => {
+      const nominal = Math.max(tension.peak, -compression.peak)
+      const local = Math.max(tension.local, -compression.local)
+      return { place, nominal, local, limit: source.material.yield ?? Infinity }
+    })
+    .filter(({ local, limit }) => local > limit)
+  if (over.length === 0) return []
+  const worst = over.reduce((one, other) => (other.local / other.limit > one.local / one.limit ? other : one))
+  const only = over.every(({ nominal, limit }) => nominal <= limit)
+  return [
+    {
+      code: 'over-yield',
+      message:
+        `${only ? 'Local stress at a fillet' : 'Stress'} over yield: up to ${describeQuantity(worst.local, 'stress')} in ` +
+        `${worst.place}, yield ${describeQuantity(worst.limit, 'stress')}. The run is linear: ` +
+        (only
+          ? 'the corner yields, the waves hardly change.'
+          : 'real stresses are lower there, the part stays deformed, and what comes after is not as computed.'),
+      where: joinPlaces(over.map(({ place }) => place)),
+    },
+  ]
+}
+
+function listLargeStrain(rows: Row[]): Caution[] {
+  const large = rows
+    .map(({ place, source, peaks: { tension, compression } }) => ({
+      place,
+      strain: Math.max(tension.peak, -compression.peak) / source.material.modulus,
+    }))
+    .filter(({ strain }) => strain > LARGE_STRAIN)
+  if (large.length === 0) return []
+  const largest = Math.max(...large.map(({ strain }) => strain))
+  return [
+    {
+      code: 'large-strain',
+      message:
+        `Strain up to ${describeQuantity(largest, 'share')}: over about 2 % the bar's length and area change too much ` +
+        'for small-strain theory, and stress means force over the first area.',
+      where: joinPlaces(large.map(({ place }) => place)),
+    },
+  ]
+}
+
+function listNoAllowable(rows: Row[]): Caution[] {
+  const stressed = rows.filter(
+    ({ peaks: { tension, compression } }) =>
+      (tension.allowable === null && tension.peak !== 0) ||
+      (compression.allowable === null && compression.peak !== 0),
+  )
+  if (stressed.length === 0) return []
+  return [
+    {
+      code: 'no-allowable',
+      message:
+        'No allowable stress was given for the stress that occurs here, so there is no margin and the governing ' +
+        'one does not count it. Give the material, the bar or the section one for tension and for compression.',
+      where: joinPlaces(stressed.map(({ place }) => place)),
+    },
+  ]
+}

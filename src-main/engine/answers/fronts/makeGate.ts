@@ -1,0 +1,42 @@
+import type { NodeTrace } from '../../records/record'
+import type { FrontNode } from './frontNode'
+
+/** Share of the largest force under which a contact is open. */
+const FORCELESS = 1e-9
+
+/** What lets a change of force through at a node. */
+export interface Gate {
+  /** Force at every step where it can open, else null [N]. */
+  force: Float64Array | null
+  peak: number
+  /**
+   * The change of force that happens at a step, out of the one that closed faces would see [N].
+   * Faces that part or meet at that step change by no more than the force recorded.
+   */
+  limit(step: number, change: number): number
+}
+
+/**
+ * Makes the gate of a node: open to all where it is bonded, as recorded where it can open.
+ *
+ * @param node what a front meets there
+ * @param trace the recorded force; null where it cannot open
+ */
+export function makeGate(node: FrontNode, trace: NodeTrace | null): Gate {
+  if (trace === null || !node.canOpen) return { force: null, peak: 0, limit: (_step, change) => change }
+  const force = trace.forceLeft
+  const peak = force.reduce((largest, F) => Math.max(largest, Math.abs(F)), 0)
+  const isClosed = (step: number) => -force[step] > FORCELESS * peak
+  return {
+    force,
+    peak,
+    limit(step, change) {
+      const before = step > 0 && isClosed(step - 1)
+      const after = isClosed(step)
+      if (before && after) return change
+      if (!before && !after) return 0
+      const recorded = force[step] - force[step - 1]
+      return recorded * change <= 0 ? 0 : Math.sign(change) * Math.min(Math.abs(change), Math.abs(recorded))
+    },
+  }
+}
