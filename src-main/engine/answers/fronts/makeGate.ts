@@ -31,11 +31,12 @@ export function makeGate(node: FrontNode, trace: NodeTrace | null): Gate {
     force,
     peak,
     limit(step, change) {
+      if (change === 0) return 0
       const before = step > 0 && isClosed(step - 1)
       const after = isClosed(step)
       if (before && after) return change
       if (!before && !after) return 0
-      const recorded = force[step] - force[step - 1]
+      const recorded = force[step] - (step > 0 ? force[step - 1] : 0)
       return recorded * change <= 0 ? 0 : Math.sign(change) * Math.min(Math.abs(change), Math.abs(recorded))
     },
   }
