@@ -10,9 +10,9 @@ export interface FaultList {
   /**
    * Adds one fault.
    * @param place where it is
-   * @param text from the table of texts
+   * @param text from the table of texts; a function where finding the words takes time
    */
-  add(place: Place, text: FaultText): void
+  add(place: Place, text: FaultText | (() => FaultText)): void
   /** True where nothing has been added. */
   readonly empty: boolean
   /**
@@ -28,14 +28,16 @@ export function makeFaultList(): FaultList {
   let surplus = 0
   return {
     add(place, text) {
-      if (items.length < LIMITS.faults) items.push({ place, text })
+      if (items.length < LIMITS.faults)
+        items.push({ place, text: typeof text === 'function' ? text() : text })
       else surplus++
     },
     get empty() {
       return items.length === 0
     },
     inOrder(document) {
-      const ranked = items.map((item) => ({ ...item, rank: rankOf(item.place, document) }))
+      const positions = new Map<object, Map<string, number>>()
+      const ranked = items.map((item) => ({ ...item, rank: rankOf(item.place, document, positions) }))
       ranked.sort((a, b) => compareRanks(a.rank, b.rank))
       const faults: Fault[] = ranked.map(({ place, text }) => ({ ...textOf(text), path: formatPlace(place) }))
       if (surplus > 0) faults.push({ ...textOf(faultText.moreFaults(surplus)), path: '' })
@@ -49,19 +51,19 @@ function textOf({ code, message }: FaultText): FaultText {
 }
 
 /** Positions of the parts of a place among their neighbours; a missing key stands after those that are there. */
-function rankOf(place: Place, document: unknown): number[] {
+function rankOf(place: Place, document: unknown, positions: Map<object, Map<string, number>>): number[] {
   const rank: number[] = []
   let value: unknown = document
   for (const part of place) {
+    const owner = typeof value === 'object' && value !== null ? value : {}
     if (typeof part === 'number') {
       rank.push(part)
-      value = Array.isArray(value) ? value[part] : undefined
     } else {
-      const keys = typeof value === 'object' && value !== null ? Object.keys(value) : []
-      const index = keys.indexOf(part)
-      rank.push(index === -1 ? keys.length : index)
-      value = index === -1 ? undefined : (value as Record<string, unknown>)[part]
+      let keys = positions.get(owner)
+      if (!keys) positions.set(owner, (keys = new Map(Object.keys(owner).map((key, i) => [key, i]))))
+      rank.push(keys.get(part) ?? keys.size)
     }
+    value = Object.hasOwn(owner, part) ? (owner as Record<string | number, unknown>)[part] : undefined
   }
   return rank
 }

@@ -2,7 +2,7 @@ import type { Fault } from '../../contract/fault'
 import type { Dimension, DimensionName } from './formula/dimension'
 import { describeDimension, DIMENSIONS } from './formula/dimension'
 import { LIMITS } from './limits'
-import { showLength, showNumber, showValue } from './showValue'
+import { quote, showLength, showNumber, showValue } from './showValue'
 
 /** A fault without its place. */
 export type FaultText = Pick<Fault, 'code' | 'message'>
@@ -17,7 +17,7 @@ const RANGES: Record<Range, string> = {
 }
 
 function did(nearest: string | null): string {
-  return nearest === null ? '' : `; did you mean "${nearest}"?`
+  return nearest === null ? '' : `; did you mean ${quote(nearest)}?`
 }
 
 /**
@@ -40,15 +40,19 @@ export const faultText = {
   }),
   duplicateKey: (key: string, line: number): FaultText => ({
     code: 'duplicate-key',
-    message: `the key "${key}" stands here a second time, in line ${line}; keep one of them`,
+    message: `the key ${quote(key)} stands here a second time, in line ${line}; keep one of them`,
   }),
   tooDeep: (line: number): FaultText => ({
     code: 'too-deep',
     message: `line ${line} holds more than ${LIMITS.jsonDepth} lists and objects inside one another; no rig needs that many`,
   }),
+  tooManyValues: (): FaultText => ({
+    code: 'too-large',
+    message: `the file holds more than ${LIMITS.jsonValues} values; put long tables into a record beside the rig`,
+  }),
   forbiddenKey: (key: string): FaultText => ({
     code: 'forbidden-key',
-    message: `the key "${key}" is never allowed; take another name`,
+    message: `the key ${quote(key)} is never allowed; take another name`,
   }),
   numberTooLarge: (text: string): FaultText => ({
     code: 'out-of-range',
@@ -62,7 +66,7 @@ export const faultText = {
   // the form
   unknownKey: (key: string, nearest: string | null, known: readonly string[]): FaultText => ({
     code: 'unknown-key',
-    message: `unknown key "${key}"${nearest === null ? `; known here: ${known.join(', ')}` : did(nearest)}`,
+    message: `unknown key ${quote(key)}${nearest === null ? `; known here: ${known.join(', ')}` : did(nearest)}`,
   }),
   missing: (expected: string): FaultText => ({
     code: 'missing',
@@ -84,6 +88,10 @@ export const faultText = {
     code: 'wrong-count',
     message: `expected ${expected}, got ${got}`,
   }),
+  tooMany: (what: string, most: number, got: number): FaultText => ({
+    code: 'too-large',
+    message: `there are ${got} ${what}; at most ${most} are read`,
+  }),
   nameTooLong: (length: number, most: number): FaultText => ({
     code: 'too-large',
     message: `the text has ${length} characters; at most ${most} are allowed`,
@@ -91,7 +99,7 @@ export const faultText = {
   nameEmpty: (): FaultText => ({ code: 'missing', message: 'is empty; give it a name' }),
   duplicateName: (name: string, first: string): FaultText => ({
     code: 'duplicate-name',
-    message: `the name "${name}" is already taken by ${first}; give each its own`,
+    message: `the name ${quote(name)} is already taken by ${first}; give each its own`,
   }),
 
   // quantities and formulas
@@ -119,7 +127,7 @@ export const faultText = {
   }),
   formulaUnknownName: (name: string, hint: string): FaultText => ({
     code: 'formula-unknown-name',
-    message: `the name "${name}" is not known${hint}`,
+    message: `the name ${quote(name)} is not known${hint}`,
   }),
   formulaNotFinite: (text: unknown, where: string): FaultText => ({
     code: 'formula-not-finite',
@@ -131,15 +139,15 @@ export const faultText = {
   }),
   variableCycle: (chain: readonly string[]): FaultText => ({
     code: 'variable-cycle',
-    message: `the variables refer to one another in a circle: ${chain.join(' -> ')}; give one of them a value of its own`,
+    message: `the variables refer to one another in a circle: ${chain.slice(0, 10).join(' -> ')}; give one of them a value of its own`,
   }),
   variableName: (name: string): FaultText => ({
     code: 'wrong-format',
-    message: `"${name}" cannot be the name of a variable; use letters, digits and _, starting with a letter`,
+    message: `${quote(name)} cannot be the name of a variable; use letters, digits and _, starting with a letter`,
   }),
   variableTaken: (name: string, meaning: string): FaultText => ({
     code: 'conflict',
-    message: `the name "${name}" already means ${meaning} in formulas; take another, such as "${name}1"`,
+    message: `the name ${quote(name)} already means ${meaning} in formulas; take another, such as ${quote(`${name}1`)}`,
   }),
   outOfRange: (value: unknown, range: Range): FaultText => ({
     code: 'out-of-range',
@@ -157,7 +165,7 @@ export const faultText = {
   // materials
   unknownMaterial: (name: string, nearest: string | null, known: readonly string[]): FaultText => ({
     code: 'unknown-material',
-    message: `there is no material "${name}"${nearest === null ? listOf(known) : did(nearest)}`,
+    message: `there is no material ${quote(name)}${nearest === null ? listOf(known) : did(nearest)}`,
   }),
   noMaterial: (): FaultText => ({
     code: 'missing',
@@ -217,7 +225,7 @@ export const faultText = {
   // references and places
   unknownBar: (name: string, nearest: string | null, known: readonly string[]): FaultText => ({
     code: 'unknown-bar',
-    message: `there is no bar "${name}"${nearest === null ? listOf(known) : did(nearest)}`,
+    message: `there is no bar ${quote(name)}${nearest === null ? listOf(known) : did(nearest)}`,
   }),
   notOnBar: (at: number, length: number): FaultText => ({
     code: 'out-of-range',
@@ -283,5 +291,5 @@ export const faultText = {
 
 function listOf(known: readonly string[]): string {
   if (known.length === 0) return '; none is defined'
-  return `; known: ${known.slice(0, 20).join(', ')}`
+  return `; known: ${known.slice(0, 20).map(quote).join(', ')}`
 }

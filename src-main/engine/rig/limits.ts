@@ -4,6 +4,15 @@ export const LIMITS = {
   textBytes: 20 * 1024 * 1024,
   /** Lists and objects inside one another in a rig file. */
   jsonDepth: 50,
+  /** Values of a rig file, lists and objects among them. */
+  jsonValues: 300_000,
+  materials: 1000,
+  bars: 1000,
+  /** Sections of all bars together. */
+  sections: 5000,
+  gauges: 1000,
+  loads: 1000,
+  studies: 100,
   /** Faults listed one by one; what is over is counted. */
   faults: 1000,
   /** Characters of one formula. */

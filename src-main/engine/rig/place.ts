@@ -1,3 +1,5 @@
+import { quote } from './showValue'
+
 /** Where a value stands in a rig file: keys and indexes from the top. */
 export type Place = readonly (string | number)[]
 
@@ -11,7 +13,7 @@ export function formatPlace(place: Place): string {
   for (const part of place) {
     if (typeof part === 'number') text += `[${part}]`
     else if (/^[A-Za-z_][A-Za-z0-9_-]*$/.test(part)) text += text === '' ? part : `.${part}`
-    else text += `[${JSON.stringify(part)}]`
+    else text += `[${quote(part)}]`
   }
   return text
 }

@@ -34,6 +34,7 @@ export function readBarPoint(
   if (form.bar === undefined) return null
   const bar = bars.findIndex(({ name }) => name === form.bar)
   if (bar === -1) {
+    if (bars.length === 0 || bars.some(({ name }) => name === null)) return null
     const known = bars.flatMap(({ name }) => (name === null ? [] : [name]))
     reading.faults.add([...place, 'bar'], faultText.unknownBar(form.bar, nearestName(form.bar, known), known))
     return null

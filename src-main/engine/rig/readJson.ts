@@ -2,6 +2,7 @@ import type { FaultList } from './faultList'
 import { faultText } from './faultText'
 import { LIMITS } from './limits'
 import type { Place } from './place'
+import { quote } from './showValue'
 
 /** Keys that reach into every object of the language. */
 const FORBIDDEN = new Set(['__proto__', 'constructor', 'prototype'])
@@ -15,7 +16,8 @@ class Unreadable extends Error {}
  * @param text the whole file, a byte-order mark at its start is skipped
  * @param faults gets `not-readable`, `too-large`, `not-json`, `duplicate-key`, `too-deep`,
  *   `forbidden-key`, `out-of-range`
- * @returns plain objects, lists, texts, numbers, booleans and nulls; undefined where it is no JSON
+ * @returns plain objects, lists, texts, numbers (NaN for one that is too large), booleans and nulls;
+ *   undefined where it is no JSON
  */
 export function readJson(text: string, faults: FaultList): unknown {
   if (text.length > LIMITS.textBytes) {
@@ -36,6 +38,7 @@ export function readJson(text: string, faults: FaultList): unknown {
 
 function makeReader(text: string, faults: FaultList) {
   let at = text.startsWith('\uFEFF') ? 1 : 0
+  let count = 0
   const place: (string | number)[] = []
 
   let countedTo = 0
@@ -63,7 +66,7 @@ function makeReader(text: string, faults: FaultList) {
   }
 
   function found(): string {
-    return at < text.length ? `found ${JSON.stringify(text[at])}` : 'the file ends here'
+    return at < text.length ? `found ${quote(text[at])}` : 'the file ends here'
   }
 
   function readString(): string {
@@ -92,7 +95,7 @@ function makeReader(text: string, faults: FaultList) {
     const value = Number(digits[0])
     if (Number.isFinite(value)) return value
     faults.add([...place], faultText.numberTooLarge(digits[0].slice(0, 30)))
-    return 0
+    return NaN
   }
 
   function readWord(): boolean | null {
@@ -139,7 +142,7 @@ function makeReader(text: string, faults: FaultList) {
     if (FORBIDDEN.has(key)) faults.add(own, faultText.forbiddenKey(key))
     else if (twice) faults.add(own, faultText.duplicateKey(key, lineAt(start).line))
     skipSpace()
-    if (text[at] !== ':') stop(`expected : after the key "${key}", ${found()}`)
+    if (text[at] !== ':') stop(`expected : after the key ${quote(key)}, ${found()}`)
     at++
     return { key, keep: !twice && !FORBIDDEN.has(key) }
   }
@@ -160,7 +163,7 @@ function makeReader(text: string, faults: FaultList) {
       if (keep) object[key] = value
       skipSpace()
       const mark = text[at]
-      if (mark !== ',' && mark !== '}') stop(`expected , or } after the value of "${key}", ${found()}`)
+      if (mark !== ',' && mark !== '}') stop(`expected , or } after the value of ${quote(key)}, ${found()}`)
       at++
       if (mark === '}') return object
     }
@@ -171,6 +174,11 @@ function makeReader(text: string, faults: FaultList) {
     if (place.length > LIMITS.jsonDepth) {
       faults.add(place.slice(0, 6), faultText.tooDeep(lineAt(at).line))
       throw new Unreadable('too deep')
+    }
+    count++
+    if (count > LIMITS.jsonValues) {
+      faults.add([], faultText.tooManyValues())
+      throw new Unreadable('too many values')
     }
     const mark = text[at]
     if (mark === '{') return readObject()

@@ -13,7 +13,8 @@ import type { Reading } from './reading'
  * @param reading gets `needs-unit`, `wrong-dimension`, `out-of-range`, `formula-refused`,
  *   `formula-syntax`, `formula-unknown-name`, `formula-not-finite`
  * @param place where it stands
- * @param value a text with a formula, or a number where no unit is needed; undefined is passed over
+ * @param value a text with a formula, or a number where no unit is needed; undefined
+ *   and NaN, which have a fault already, are passed over
  * @param dimension what it must be
  * @param range values that it may take
  * @returns SI, or null where it is missing or faulty
@@ -68,6 +69,7 @@ export function readQuantityFormula(
   dimension: DimensionName,
   args: FormulaArguments,
 ): Formula | null {
+  if (Number.isNaN(value)) return null
   if (typeof value === 'number') {
     if (dimension === 'number') return makeFixedFormula(value, PLAIN)
     reading.faults.add(place, faultText.needsUnit(value, dimension))

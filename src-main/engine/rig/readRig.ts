@@ -1,6 +1,7 @@
 import type { Fault } from '../../contract/fault'
 import type { Bar, Rig, RunSettings } from '../../contract/rig'
 import { checkComputed } from './checkComputed'
+import { checkCounts } from './checkCounts'
 import { checkNames } from './checkNames'
 import { checkSize } from './checkSize'
 import { checkStudies } from './checkStudies'
@@ -53,6 +54,7 @@ export function readRig(text: string, options: ReadRigOptions = {}): RigReading 
 }
 
 function readForm(reading: Reading, form: Loose<RigForm>, method: RunSettings['method'] | null): Rig | null {
+  if (!checkCounts(form, reading.faults)) return null
   checkNames(form, reading.faults)
   readVariables(reading, form.variables ?? {})
   const materials = readMaterials(reading, form.materials ?? {})
@@ -61,7 +63,7 @@ function readForm(reading: Reading, form: Loose<RigForm>, method: RunSettings['m
   const bars = readBars(reading, form.bars ?? [], materials)
   const leftEnd = readEnd(reading, 'leftEnd', form.leftEnd, bars[0]?.bar ?? null, duration)
   const rightEnd = readEnd(reading, 'rightEnd', form.rightEnd, bars[bars.length - 1]?.bar ?? null, duration)
-  const joints = readJoints(reading, form.joints, Math.max(0, bars.length - 1))
+  const joints = readJoints(reading, form.joints, bars.length === 0 ? null : bars.length - 1)
   const loads = readLoads(reading, form.loads, bars, { left: leftEnd, right: rightEnd }, duration)
   const gravity = readOptionalQuantity(reading, ['gravity'], form.gravity, 'acceleration', 'any', 0)
   const gauges = readGauges(reading, form.gauges, bars)

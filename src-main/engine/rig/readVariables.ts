@@ -3,7 +3,6 @@ import { DIMENSIONS, PLAIN } from './formula/dimension'
 import { findUnit } from './formula/findUnit'
 import { CONSTANTS } from './formula/formula'
 import { FORMULA_FUNCTIONS } from './formula/formulaFunctions'
-import { LIMITS } from './limits'
 import type { Place } from './place'
 import type { Reading } from './reading'
 
@@ -15,11 +14,6 @@ import type { Reading } from './reading'
  */
 export function readVariables(reading: Reading, raw: Record<string, string | number | undefined>): void {
   const place = (name: string): Place => ['variables', name]
-  const count = Object.keys(raw).length
-  if (count > LIMITS.variables) {
-    reading.faults.add(['variables'], faultText.wrongCount(`at most ${LIMITS.variables} variables`, count))
-    return
-  }
   const names = Object.keys(raw).filter((name) => checkName(reading, place(name), name))
   const open: string[] = []
   const broken = new Set<string>()

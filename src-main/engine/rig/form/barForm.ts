@@ -17,12 +17,9 @@ function outline(what: string) {
         {
           from: quantity('length', `${what} at the left face of the section`),
           to: quantity('length', `${what} at the right face of the section`),
-          profile: z
-            .enum(['linear', 'exponential', 'area-linear'])
-            .optional()
-            .meta({
-              description: 'linear (a cone) where left out; in area-linear the area of its circle is linear',
-            }),
+          profile: z.enum(['linear', 'exponential', 'area-linear']).optional().meta({
+            description: 'linear (a cone) where left out; in area-linear the area of its circle is linear',
+          }),
         },
         `${what} that changes along the section`,
       ),

@@ -48,7 +48,7 @@ function report(issue: Issue, parent: Place, document: unknown, faults: FaultLis
   if (issue.code === 'unrecognized_keys') {
     const known = issue.message.split(' ')
     for (const key of issue.keys) {
-      faults.add([...place, key], faultText.unknownKey(key, nearestName(key, known), known))
+      faults.add([...place, key], () => faultText.unknownKey(key, nearestName(key, known), known))
     }
     return
   }
@@ -61,7 +61,11 @@ function report(issue: Issue, parent: Place, document: unknown, faults: FaultLis
   }
   const value = valueAt(document, place)
   const reported = Number.isNaN(value)
-  if (!reported) faults.add(place, value === undefined ? faultText.missing(expectedOf(issue)) : textOf(issue, value))
+  if (!reported) {
+    faults.add(place, () =>
+      value === undefined ? faultText.missing(expectedOf(issue)) : textOf(issue, value),
+    )
+  }
   takeOut(document, place)
 }
 

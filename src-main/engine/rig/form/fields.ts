@@ -17,7 +17,7 @@ export function quantity(dimension: Exclude<DimensionName, 'number'>, descriptio
   const { label, example } = DIMENSIONS[dimension]
   return z
     .unknown()
-    .refine((value) => typeof value === 'string', { params })
+    .refine((value) => typeof value === 'string', { params, abort: true })
     .meta({ type: 'string', description: `${description} (${label}, such as "${example}")` })
 }
 
@@ -29,7 +29,7 @@ export function plainNumber(description: string) {
   const params: QuantityParameters = { quantity: 'number' }
   return z
     .unknown()
-    .refine((value) => typeof value === 'string' || typeof value === 'number', { params })
+    .refine((value) => typeof value === 'string' || typeof value === 'number', { params, abort: true })
     .meta({ type: ['number', 'string'], description: `${description} (a plain number)` })
 }
 

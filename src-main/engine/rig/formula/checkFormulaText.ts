@@ -1,5 +1,6 @@
 import { faultText } from '../faultText'
 import { LIMITS } from '../limits'
+import { quote } from '../showValue'
 import { FormulaRefusal } from './formulaRefusal'
 
 /** Why a character can stand in no formula. */
@@ -37,7 +38,7 @@ export function checkFormulaText(text: string): string {
   if (plain.trim() === '') throw new FormulaRefusal(faultText.formulaSyntax('it is empty'))
   for (const [pattern, why] of REASONS) if (pattern.test(plain)) refuse(why)
   const strange = /[^A-Za-z0-9_ +\-*/^().,<>=!?:]/.exec(plain)
-  if (strange) refuse(`the sign ${JSON.stringify(strange[0])} has no place in it`)
+  if (strange) refuse(`the sign ${quote(strange[0])} has no place in it`)
   checkDepth(plain)
   const tokens = plain.match(/[A-Za-z_][A-Za-z0-9_]*|[0-9.]+|[+\-*/^<>=!?]+/g) ?? []
   const signs = plain.match(/[-+]/g) ?? []

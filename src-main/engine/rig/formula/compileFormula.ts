@@ -10,6 +10,7 @@ import type {
 } from 'mathjs'
 import { faultText } from '../faultText'
 import { nearestName } from '../nearestName'
+import { quote } from '../showValue'
 import type { Dimension } from './dimension'
 import { describeDimension, DIMENSIONS, isSameDimension, PLAIN } from './dimension'
 import { compileName } from './compileName'
@@ -120,7 +121,7 @@ function compileOperator(node: OperatorNode<never, never>, scope: Scope, divides
   if (Object.hasOwn(COMPARISONS, fn)) {
     return refuse('a comparison stands only before ? in a choice such as "t < 5 us ? 2 kN : 0 kN"')
   }
-  const sign = (node.op as string) === '!' ? 'factorials (!) have' : `"${node.op as string}" has`
+  const sign = (node.op as string) === '!' ? 'factorials (!) have' : `${quote(node.op as string)} has`
   return refuse(`${sign} no place in it`)
 }
 
@@ -149,7 +150,7 @@ function compileCall(node: FunctionNode, scope: Scope): Formula {
   if (typeof name !== 'string' || !known) {
     const nearest = nearestName(String(name), FORMULA_FUNCTIONS.keys())
     return refuse(
-      `the function "${String(name)}" has no place in it${nearest ? `; did you mean "${nearest}"?` : ''}`,
+      `the function ${quote(String(name))} has no place in it${nearest ? `; did you mean ${quote(nearest)}?` : ''}`,
     )
   }
   const [least, most] = known.count

@@ -1,5 +1,6 @@
 import { parse } from 'csv-parse/browser/esm/sync'
 import { LIMITS } from '../limits'
+import { quote } from '../showValue'
 
 /** A record as numbers, before its units. */
 export interface RecordColumns {
@@ -52,7 +53,7 @@ export function parseRecord(text: string): RecordColumns | { refused: string } {
 
 function notNumber(cell: string, row: number, column: number): string {
   const comma = /^[-+]?[0-9]+,[0-9]+$/.test(cell) ? '; write decimals with a point' : ''
-  return `row ${row}, column ${column} holds ${JSON.stringify(cell.slice(0, 30))}, which is no number${comma}`
+  return `row ${row}, column ${column} holds ${quote(cell)}, which is no number${comma}`
 }
 
 function splitRows(text: string): { rows: string[][] } | { refused: string } {

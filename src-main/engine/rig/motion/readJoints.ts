@@ -19,20 +19,21 @@ type LawForm = NonNullable<SpecimenForm['law']>
  * Reads the joints between the bars; contacts without gap where they are left out.
  * @param reading gets `wrong-count`, `conflict`, `missing` and the faults of quantities
  * @param forms undefined where they are left out
- * @param count one fewer than bars
+ * @param count one fewer than bars; null where the bars are missing
  * @returns one per joint, or null where any is faulty
  */
 export function readJoints(
   reading: Reading,
   forms: (JointForm | undefined)[] | undefined,
-  count: number,
+  count: number | null,
 ): Joint[] | null {
-  if (forms === undefined) return Array.from({ length: count }, () => ({ kind: 'contact', gap: 0 }))
-  if (forms.length !== count) {
-    const expected = `${count} ${count === 1 ? 'joint' : 'joints'}, one fewer than bars`
-    reading.faults.add(['joints'], faultText.wrongCount(expected, forms.length))
+  const joints = forms?.map((form, i) => (form ? readJoint(reading, ['joints', i], form) : null))
+  if (count === null) return null
+  if (joints === undefined) return Array.from({ length: count }, () => ({ kind: 'contact', gap: 0 }))
+  if (joints.length !== count) {
+    const expected = `${count} joint${count === 1 ? '' : 's'}, one fewer than bars`
+    reading.faults.add(['joints'], faultText.wrongCount(expected, joints.length))
   }
-  const joints = forms.map((form, i) => (form ? readJoint(reading, ['joints', i], form) : null))
   return joints.length === count && joints.every((joint) => joint !== null) ? joints : null
 }
 

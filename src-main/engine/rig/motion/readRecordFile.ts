@@ -5,6 +5,7 @@ import type { Place } from '../place'
 import { readQuantity, readQuantityFormula } from '../readQuantity'
 import type { Reading } from '../reading'
 import { checkRecordPath } from './checkRecordPath'
+import { quote } from '../showValue'
 import { parseRecord } from './parseRecord'
 import type { Columns } from './readPairs'
 
@@ -42,9 +43,10 @@ export function readRecordFile(
   }
   if (reading.readRecord === null) return refuse('there is no folder beside the rig to read records from')
   const text = reading.readRecord(form.file)
-  if (typeof text !== 'string') return refuse(`the record "${form.file}" cannot be read: ${text.refused}`)
+  if (typeof text !== 'string')
+    return refuse(`the record ${quote(form.file)} cannot be read: ${text.refused}`)
   const record = parseRecord(text)
-  if ('refused' in record) return refuse(`in "${form.file}": ${record.refused}`)
+  if ('refused' in record) return refuse(`in ${quote(form.file)}: ${record.refused}`)
   const columns = [
     readColumn(reading, place, 'time', form.columns?.time ?? 1, record, 'time'),
     readColumn(reading, place, 'value', form.columns?.value ?? 2, record, dimension),
@@ -54,7 +56,7 @@ export function readRecordFile(
   const late = first.findIndex((time, i) => i > 0 && time <= first[i - 1])
   if (late === -1) return { first, second }
   return refuse(
-    `in "${form.file}": times must rise from row to row; row ${late + record.firstRow} does not come after the one before it`,
+    `in ${quote(form.file)}: times must rise from row to row; row ${late + record.firstRow} does not come after the one before it`,
   )
 }
 
@@ -84,7 +86,7 @@ function readColumn(
   if (number === undefined && named.length !== 1) {
     const found = named.length === 0 ? 'no column' : `${named.length} columns`
     return refuse(
-      `the record has ${found} "${name}"; its headings are ${record.headings.map((it) => `"${it}"`).join(', ')}`,
+      `the record has ${found} ${quote(name ?? '')}; its headings are ${record.headings.map(quote).join(', ')}`,
     )
   }
   const index = number === undefined ? named[0] : number - 1
@@ -105,7 +107,7 @@ function readUnit(
   const bracket = /[[(]([^[\]()]+)[\])]\s*$/.exec(heading)
   if (bracket === null) {
     return refuse(
-      `the heading "${heading}" has no unit in brackets, such as "F [kN]"; give the column as an object with a unit`,
+      `the heading ${quote(heading)} has no unit in brackets, such as "F [kN]"; give the column as an object with a unit`,
     )
   }
   const formula = readQuantityFormula(reading, place.slice(0, -1), bracket[1], dimension, 'none')
