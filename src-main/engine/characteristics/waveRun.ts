@@ -1,7 +1,7 @@
 import type { Line } from '../line/line'
 import type { Port } from '../laws/barSide'
 import type { Outside } from '../laws/outside'
-import type { Body, NodeLaw } from '../laws/side'
+import type { Beat, Body, NodeLaw } from '../laws/side'
 import type { Block } from './block'
 import type { DelayEnvelope } from './delayEnvelope'
 import type { DelayLine } from './delayLine'
@@ -70,4 +70,5 @@ export interface WaveRun {
   bodies: Body[]
   outside: { left: Outside; right: Outside; loads: Outside[] }
   graded: GradedState
+  beat: Beat
 }

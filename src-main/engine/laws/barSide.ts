@@ -23,11 +23,14 @@ export interface Port {
 export function makeBarSide(port: Port, hand: Hand): Side {
   const { arriving, leaving, leavingOffset } = port
   const admittance = 1 / port.impedance
+  let last = 0
   return {
     admittance,
     freeVelocity: (k) => -hand * 2 * arriving[k] * admittance,
-    take(k, force) {
+    lastVelocity: () => last,
+    take(k, force, velocity) {
       leaving[k + leavingOffset] = force - arriving[k]
+      last = velocity
     },
   }
 }

@@ -1,22 +1,32 @@
 import { CompensatedSum } from './compensatedSum'
 import type { Outside } from './outside'
-import type { Beat, Body, Hand, Side } from './side'
+import { type Beat, type Body, evaluateWorking, type Hand, type Side } from './side'
+
+/** Share of a step over which a force has moved a mass when its face has the step's velocity. */
+function evaluateReach(beat: Beat): number {
+  return 1 / (2 * beat.alpha)
+}
 
 /**
- * A rigid mass, `M dV/dt = F` by the midpoint rule: V is kept at the half steps and the face moves
- * with the mean of two of them, so that the work of F is exactly the gain of M V^2 / 2.
+ * A rigid mass, `M dV/dt = F`, its velocity V kept at the half steps, so that the work of F is
+ * exactly the gain of M V^2 / 2. By characteristics its face moves with the mean of two V (the
+ * midpoint rule), with elements with the new V (central difference).
  *
  * @param mass [kg], positive
  * @param velocity at the start [m/s]
  */
 export function makeMass(mass: number, velocity: number, beat: Beat): Body {
+  const reach = evaluateReach(beat)
   let V = velocity
+  let last = velocity
   return {
     mass,
-    admittance: beat.dt / (2 * mass),
+    admittance: (reach * beat.dt) / mass,
     freeVelocity: () => V,
+    lastVelocity: () => last,
     take(_k, _force, faceVelocity) {
-      V = 2 * faceVelocity - V
+      V += (faceVelocity - V) / reach
+      last = faceVelocity
     },
     kinetic: (frame) => (mass * (V + frame) ** 2) / 2,
     strain: () => 0,
@@ -38,24 +48,29 @@ export function makeSupport(
   outside: Outside,
 ): Body {
   const { stiffness: K, damping: D, mass } = support
-  const { dt, gravity } = beat
-  const Zm = (2 * mass) / dt
+  const { dt, gravity, alpha } = beat
+  const reach = evaluateReach(beat)
+  const Zm = mass / (reach * dt)
   const Zg = D + (K * dt) / 2
-  const admittance = 1 / (Zm + Zg)
+  const admittance = 1 / (Zm + alpha * Zg)
   const lost = new CompensatedSum()
   let V = 0
   let S = 0
+  let last = 0
+  const fall = (k: number) => gravity * dt * k
   return {
     mass,
     admittance,
-    freeVelocity: (k) => (Zm * V - S - Zg * gravity * dt * k) * admittance,
+    freeVelocity: (k) => (Zm * V - S - Zg * (fall(k) + (1 - alpha) * last)) * admittance,
+    lastVelocity: () => last,
     take(k, _force, velocity) {
-      const v = velocity + gravity * dt * k
+      const v = evaluateWorking(beat, velocity, last) + fall(k)
       const before = S
       S += K * dt * v
-      if (mass > 0) V = 2 * velocity - V
+      if (mass > 0) V += (velocity - V) / reach
+      last = velocity
       lost.add(D * v * v * dt)
-      outside.add(k, -(before + S) / 2 - D * v, -gravity * dt * k)
+      outside.add(k, -(before + S) / 2 - D * v, -fall(k))
     },
     kinetic: (frame) => (mass * (V + frame) ** 2) / 2,
     strain: () => (K > 0 ? (S * S) / (2 * K) : 0),
@@ -67,7 +82,7 @@ export function makeSupport(
 /**
  * A face that moves as prescribed, whatever the force; a rigid wall is one at rest.
  *
- * @param velocity prescribed velocity at step k [m/s]
+ * @param velocity prescribed velocity of step k, in the frame of the ground [m/s]
  * @param outside where its force and work are booked
  */
 export function makeMotion(
@@ -76,10 +91,15 @@ export function makeMotion(
   beat: Beat,
   outside: Outside,
 ): Side {
+  let last = velocity(0)
   return {
     admittance: 0,
     freeVelocity: (k) => velocity(k) - beat.gravity * beat.dt * k,
-    take: (k, force, v) => outside.add(k, -hand * force, v),
+    lastVelocity: () => last,
+    take(k, force, v) {
+      outside.add(k, -hand * force, evaluateWorking(beat, v, last))
+      last = v
+    },
   }
 }
 
@@ -89,12 +109,26 @@ export function makeMotion(
  *
  * @param impedance Z [kg/s]
  * @param arriving the wave that stands in it at the start and goes on arriving [N]
+ * @param velocity of the bar at the start [m/s]
  */
-export function makeMatched(impedance: number, arriving: number, hand: Hand, outside: Outside): Side {
+export function makeMatched(
+  impedance: number,
+  arriving: number,
+  velocity: number,
+  hand: Hand,
+  beat: Beat,
+  outside: Outside,
+): Side {
   const admittance = 1 / impedance
+  const { alpha } = beat
+  let last = velocity
   return {
-    admittance,
-    freeVelocity: () => -hand * 2 * arriving * admittance,
-    take: (k, force, v) => outside.add(k, -hand * force, v),
+    admittance: admittance / alpha,
+    freeVelocity: () => (-hand * 2 * arriving * admittance - (1 - alpha) * last) / alpha,
+    lastVelocity: () => last,
+    take(k, force, v) {
+      outside.add(k, -hand * force, evaluateWorking(beat, v, last))
+      last = v
+    },
   }
 }

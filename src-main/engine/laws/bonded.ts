@@ -1,10 +1,11 @@
 import type { Port } from './barSide'
+import { CompensatedSum } from './compensatedSum'
 import type { Outside } from './outside'
-import type { NodeLaw, Side } from './side'
+import { type Beat, evaluateWorking, type NodeLaw, type Side } from './side'
 
 /**
  * Two bars bonded, with an outside force Q at the node: `v = (2 g - 2 f + Q) / (Z1 + Z2)`,
- * `F_left = F_right + Q`.
+ * `F_left = F_right + Q`. By characteristics.
  *
  * @param load Q at step k, positive to the right [N], and where it is booked; null for none
  */
@@ -49,20 +50,26 @@ export function makeBonded(
   }
 }
 
-/** Two sides that stay together: one velocity, one force `F = (v_right0 - v_left0) / (Y_left + Y_right)`. */
-export function makeBond(left: Side, right: Side): NodeLaw {
+/**
+ * Two sides that stay together: one velocity, one force `F = (v_right0 - v_left0) / (Y_left + Y_right)`.
+ * With elements, sides that start at different velocities are brought together at a loss.
+ */
+export function makeBond(left: Side, right: Side, beat: Beat): NodeLaw {
   const Y = left.admittance + right.admittance
+  const lost = new CompensatedSum()
   return {
     advance(from, to) {
       for (let k = from; k < to; k++) {
         const v0 = left.freeVelocity(k)
         const F = (right.freeVelocity(k) - v0) / Y
         const v = v0 + left.admittance * F
+        const parting = evaluateWorking(beat, 0, right.lastVelocity() - left.lastVelocity())
+        if (parting !== 0) lost.add(beat.dt * F * parting)
         left.take(k, F, v)
         right.take(k, F, v)
       }
     },
     strain: () => 0,
-    dissipated: () => 0,
+    dissipated: () => lost.value,
   }
 }

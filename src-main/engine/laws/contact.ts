@@ -1,16 +1,16 @@
 import { CompensatedSum } from './compensatedSum'
-import type { NodeLaw, Side } from './side'
+import { type Beat, evaluateWorking, type NodeLaw, type Side } from './side'
 
 /**
- * Flat faces that press but never pull: `F <= 0`, with a gap `d >= 0` kept at the half steps.
+ * Flat faces that press but never pull: `F <= 0`, with a gap `d >= 0` kept between the steps.
  * Over a step either the faces are apart (`F = 0`) or they end it touching,
- * `d + dt (v_right - v_left) = 0`. A gap that closes inside a step takes `-F d` of energy,
- * first order in dt, which is booked as the joint's loss.
+ * `d + dt (v_right - v_left) = 0`. A gap that closes inside a step takes a little energy, first
+ * order in dt, which is booked as the joint's loss: `F (v_right - v_left) dt`.
  *
  * @param gap at the start [m], zero or positive
- * @param dt [s]
  */
-export function makeContact(left: Side, right: Side, gap: number, dt: number): NodeLaw {
+export function makeContact(left: Side, right: Side, gap: number, beat: Beat): NodeLaw {
+  const { dt } = beat
   const Y = left.admittance + right.admittance
   const lost = new CompensatedSum()
   let d = gap
@@ -26,7 +26,8 @@ export function makeContact(left: Side, right: Side, gap: number, dt: number): N
           right.take(k, 0, vr)
         } else {
           const F = apart / (dt * Y)
-          if (d !== 0) lost.add(-F * d)
+          const parting = evaluateWorking(beat, -d / dt, right.lastVelocity() - left.lastVelocity())
+          if (parting !== 0) lost.add(dt * F * parting)
           d = 0
           left.take(k, F, vl + left.admittance * F)
           right.take(k, F, vr - right.admittance * F)

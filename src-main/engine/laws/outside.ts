@@ -18,7 +18,7 @@ export class Outside {
    *
    * @param k the step
    * @param force force of the surroundings on the rig, positive to the right [N]
-   * @param velocity velocity of the point in the falling frame [m/s]
+   * @param velocity velocity in the falling frame at which it works [m/s]
    */
   add(k: number, force: number, velocity: number): void {
     const { dt, gravity } = this.beat

@@ -1,5 +1,5 @@
 import type { Outside } from './outside'
-import type { Hand, NodeLaw, Side } from './side'
+import { type Beat, evaluateWorking, type Hand, type NodeLaw, type Side } from './side'
 
 /**
  * An end where the surroundings push with a prescribed force T, positive to the right:
@@ -14,6 +14,7 @@ export function makePrescribedForce(
   bar: Side,
   hand: Hand,
   force: (k: number) => number,
+  beat: Beat,
   outside: Outside,
 ): NodeLaw {
   return {
@@ -22,8 +23,8 @@ export function makePrescribedForce(
         const T = force(k)
         const F = hand * T
         const v = bar.freeVelocity(k) + hand * bar.admittance * F
+        outside.add(k, T, evaluateWorking(beat, v, bar.lastVelocity()))
         bar.take(k, F, v)
-        outside.add(k, T, v)
       }
     },
     strain: () => 0,

@@ -3,8 +3,9 @@
  *
  * Over one step the body answers a force F (tension positive) with the velocity
  * `v = freeVelocity + admittance F` where it stands left of the node, and
- * `v = freeVelocity - admittance F` where it stands right of it. For a bar's face this is
- * `F = 2 f + Z v` (left) and `F = 2 g - Z v` (right), the admittance being 1/Z.
+ * `v = freeVelocity - admittance F` where it stands right of it. For the face of a bar marched by
+ * characteristics this is `F = 2 f + Z v` (left) and `F = 2 g - Z v` (right), the admittance being
+ * 1/Z; for the end node of elements it is `v = v_trial + (dt/M) F`, the admittance being dt/M.
  *
  * Velocities are those in a frame that falls with the rig's gravity, so that gravity does no work
  * in it; only what is held by the ground knows the difference.
@@ -14,14 +15,16 @@ export interface Side {
   admittance: number
   /** Velocity at step k if no force acted [m/s]. */
   freeVelocity(k: number): number
+  /** Velocity that `take` was last given, or the initial one [m/s]. */
+  lastVelocity(): number
   /** Takes the force [N] and the velocity [m/s] that the joint has found for step k. */
   take(k: number, force: number, velocity: number): void
 }
 
 /** A body that holds energy and momentum of its own between two steps. */
 export interface Body extends Side {
-  /** [J], in the falling frame where `velocity` is that frame's own velocity [m/s]. */
-  kinetic(frameVelocity: number): number
+  /** [J], in the frame of the ground where `frame` is the falling frame's velocity [m/s]. */
+  kinetic(frame: number): number
   strain(): number
   /** Energy its own damping has taken so far [J]. */
   dissipated(): number
@@ -49,4 +52,15 @@ export interface Beat {
   dt: number
   /** [m/s^2] along x */
   gravity: number
+  /**
+   * Share of a step's own velocity in the velocity at which its force works, the rest being the
+   * velocity before: 1 for characteristics, whose velocity at step k is that at t_k; 1/2 for
+   * elements, whose velocity at step k is that at t_k + dt/2.
+   */
+  alpha: number
+}
+
+/** Velocity at which the force of a step works [m/s]: see `Beat.alpha`. */
+export function evaluateWorking(beat: Beat, velocity: number, before: number): number {
+  return beat.alpha === 1 ? velocity : beat.alpha * velocity + (1 - beat.alpha) * before
 }
