@@ -1,5 +1,11 @@
 import type { MathNode, UnitCtor } from 'mathjs'
-import { create, parseDependencies, UnitDependencies } from 'mathjs'
+import { createUnitClass } from 'mathjs'
+import { create, parseDependencies } from 'mathjs/number'
+
+declare module 'mathjs' {
+  /** Exported by mathjs, but missing in its types. */
+  function createUnitClass(parts: Record<string, unknown>): UnitCtor
+}
 
 /** The two parts of mathjs that are used: text to tree, and the table of units. Nothing evaluates. */
 export interface Parser {
@@ -22,6 +28,29 @@ const MORE_UNITS = {
   mph: `${1609.344 / 3600} m/s`,
 } as const
 
+/**
+ * What the class of units computes with: plain numbers. Its own choice brings big numbers, fractions
+ * and complex ones, which take ten times as long to start.
+ */
+const PLAIN_NUMBERS = {
+  config: { number: 'number', predictable: false },
+  addScalar: (a: number, b: number) => a + b,
+  subtractScalar: (a: number, b: number) => a - b,
+  multiplyScalar: (a: number, b: number) => a * b,
+  divideScalar: (a: number, b: number) => a / b,
+  pow: Math.pow,
+  abs: Math.abs,
+  fix: Math.trunc,
+  round: Math.round,
+  equal: (a: number, b: number) => a === b,
+  isNumeric: (value: unknown) => typeof value === 'number',
+  format: String,
+  number: Number,
+  Complex: class {},
+  BigNumber: class {},
+  Fraction: class {},
+}
+
 let parser: Parser | null = null
 
 /**
@@ -29,10 +58,11 @@ let parser: Parser | null = null
  */
 export function getParser(): Parser {
   if (parser) return parser
-  const math = create({ parseDependencies, UnitDependencies }, { number: 'number' }) as unknown as Parser
+  const { parse } = create({ parseDependencies }, { number: 'number' }) as unknown as Pick<Parser, 'parse'>
+  const Unit = createUnitClass(PLAIN_NUMBERS)
   for (const [name, definition] of Object.entries(MORE_UNITS)) {
-    math.Unit.createUnit({ [name]: definition }, { override: true })
+    Unit.createUnit({ [name]: definition }, { override: true })
   }
-  parser = math
-  return math
+  parser = { parse, Unit }
+  return parser
 }
