@@ -1,11 +1,12 @@
 import type { Wavefront } from '../../contract/result'
 import type { Line } from '../line/line'
 import type { RunRecord } from '../records/record'
+import { evaluateForceless } from './evaluateForceless'
 import { makeFrontNode } from './fronts/frontNode'
 import { listClosings } from './fronts/listClosings'
 import { listFrontSources, type FrontSource } from './fronts/listFrontSources'
 import { makeFrontTrace, type FrontTrace } from './fronts/makeFrontTrace'
-import { makeGate } from './fronts/makeGate'
+import { makeGate, type Gate } from './fronts/makeGate'
 
 /**
  * The lines that sudden fronts draw in the x-t diagram, from every start through every step and joint.
@@ -16,7 +17,7 @@ import { makeGate } from './fronts/makeGate'
  * changed by sqrt(Z2/Z1), and is `spread` from there on, since a tail follows it; a taper sends no front back.
  *
  * @param line the cut line
- * @param record of the run; the traces of its joints and ends
+ * @param record of the run; its envelope and the traces of its joints and ends
  * @param options threshold: fronts under this share of the first of their start, and starts under this
  *   share of the largest, are dropped (0.02). most: lines drawn at most, the earliest ones (4000)
  * @returns the lines in order of their start time; the force is that at their far end over that of the
@@ -24,12 +25,13 @@ import { makeGate } from './fronts/makeGate'
  */
 export function traceWavefronts(
   line: Line,
-  record: Pick<RunRecord, 'node'>,
+  record: Pick<RunRecord, 'node' | 'envelope'>,
   options: { threshold?: number; most?: number } = {},
 ): Wavefront[] {
   const { threshold = 0.02, most = 4000 } = options
   const nodes = line.nodes.map((_, i) => makeFrontNode(line, i))
-  const gates = nodes.map((node, i) => makeGate(node, node.canOpen ? record.node(i) : null))
+  const forceless = evaluateForceless(record.envelope)
+  const gates = nodes.map((node, i) => makeGate(node, node.canOpen ? record.node(i) : null, forceless))
   const sources = nodes.map((node, i) => listFrontSources(line, i, node))
   const largest = Math.max(0, ...sources.flat().map(evaluateSize))
   const trace = makeFrontTrace(line, nodes, gates, { threshold, most })
@@ -38,7 +40,7 @@ export function traceWavefronts(
     const start = trace.addStart(evaluateFirst(own[0]))
     for (const source of own) trace.emit(start, source)
   }
-  addClosings(trace, line, gates)
+  addClosings(trace, line, gates, forceless)
   for (let step = 0; step < line.steps && trace.fronts.length < most; step++) trace.advance(step)
   return trace.fronts
 }
@@ -52,10 +54,10 @@ function evaluateFirst({ left, right }: FrontSource): number {
 }
 
 /** A gap that closes where no front arrives at that time is a start of its own. */
-function addClosings(trace: FrontTrace, line: Line, gates: ReturnType<typeof makeGate>[]): void {
+function addClosings(trace: FrontTrace, line: Line, gates: Gate[], forceless: number): void {
   gates.forEach((gate, node) => {
     if (gate.force === null) return
-    for (const { step, force } of listClosings(gate.force, gate.peak))
+    for (const { step, force } of listClosings(gate.force, forceless))
       trace.addClosing(step, {
         step,
         node,

@@ -3,6 +3,7 @@ import type { End, Pulse, Rig } from '../../../contract/rig'
 import type { Line } from '../../line/line'
 import type { RunRecord } from '../../records/record'
 import { describePlace } from '../describePlace'
+import { evaluateForceless } from '../evaluateForceless'
 import { describeQuantity } from './describeQuantity'
 import { joinPlaces } from './joinPlaces'
 
@@ -13,9 +14,9 @@ import { joinPlaces } from './joinPlaces'
  * Chree; the number is common practice).
  *
  * @param line the cut line
- * @param record of the run; the traces of its joints and ends
+ * @param record of the run; its envelope and the traces of its joints and ends
  */
-export function listFrontCautions(line: Line, record: Pick<RunRecord, 'node'>): Caution[] {
+export function listFrontCautions(line: Line, record: Pick<RunRecord, 'node' | 'envelope'>): Caution[] {
   return [...listShortRise(line), ...listFlatFaces(line, record)]
 }
 
@@ -84,10 +85,11 @@ function listTimes(pulse: Pulse, isDisplacement: boolean): number[] {
   return times
 }
 
-function listFlatFaces(line: Line, record: Pick<RunRecord, 'node'>): Caution[] {
+function listFlatFaces(line: Line, record: Pick<RunRecord, 'node' | 'envelope'>): Caution[] {
   const { rig } = line
   const places: string[] = []
-  const carries = (node: number) => record.node(node)?.forceLeft.some((force) => force !== 0) ?? false
+  const forceless = evaluateForceless(record.envelope)
+  const carries = (node: number) => record.node(node)?.forceLeft.some((force) => -force > forceless) ?? false
   line.nodes.forEach((node, i) => {
     if (node.kind !== 'joint' || rig.joints[node.joint].kind !== 'contact' || !carries(i)) return
     places.push(`${rig.bars[node.joint].name} | ${rig.bars[node.joint + 1].name}`)

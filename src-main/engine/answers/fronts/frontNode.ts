@@ -11,6 +11,8 @@ export interface FrontNode {
   right: number
   /** The joint's own: 0 where the faces move as one, 1/D for a dashpot, Infinity for a spring. */
   joint: number
+  /** True where each face carries a mass of its own: a front turns back from it and nothing passes at once. */
+  heavy: boolean
   /** True where it carries no tension. */
   canOpen: boolean
   /** [m] at the start */
@@ -34,13 +36,20 @@ export function makeFrontNode(line: Line, index: number): FrontNode {
   const joint = nodes[index].kind === 'joint' ? rig.joints[nodes[index].joint] : { kind: 'bonded' as const }
   switch (joint.kind) {
     case 'bonded':
-      return { left, right, joint: 0, canOpen: false, gap: 0 }
+      return { left, right, joint: 0, heavy: false, canOpen: false, gap: 0 }
     case 'contact':
-      return { left, right, joint: 0, canOpen: true, gap: joint.gap }
+      return { left, right, joint: 0, heavy: false, canOpen: true, gap: joint.gap }
     case 'cushion':
-      return { left, right, joint: 1 / joint.damping, canOpen: !joint.tension, gap: joint.gap }
+      return {
+        left,
+        right,
+        joint: 1 / joint.damping,
+        heavy: joint.mass > 0,
+        canOpen: !joint.tension && joint.mass === 0,
+        gap: joint.gap,
+      }
     case 'specimen':
-      return { left, right, joint: Infinity, canOpen: false, gap: 0 }
+      return { left, right, joint: Infinity, heavy: false, canOpen: false, gap: 0 }
   }
 }
 
@@ -59,8 +68,8 @@ function evaluateOutside(end: End, bar: number): number {
   }
 }
 
-function describeEnd(end: End): Pick<FrontNode, 'joint' | 'canOpen' | 'gap'> {
-  if (end.kind === 'wall') return { joint: 0, canOpen: true, gap: end.gap }
+function describeEnd(end: End): Pick<FrontNode, 'joint' | 'heavy' | 'canOpen' | 'gap'> {
+  if (end.kind === 'wall') return { joint: 0, heavy: false, canOpen: true, gap: end.gap }
   const canOpen = (end.kind === 'mass' || end.kind === 'support') && end.joint === 'contact'
-  return { joint: 0, canOpen, gap: canOpen ? end.gap : 0 }
+  return { joint: 0, heavy: false, canOpen, gap: canOpen ? end.gap : 0 }
 }

@@ -57,7 +57,7 @@ function evaluateStart(
   const { spans } = line
   const leftBar = index > 0 ? evaluateInitial(line, index - 1, spans[index - 1].cells) : null
   const rightBar = index < spans.length ? evaluateInitial(line, index, 0) : null
-  if (end?.kind === 'matched') return { left: 0, right: 0 }
+  if (end?.kind === 'matched' || node.heavy) return { left: 0, right: 0 }
   const outside = end?.kind === 'mass' ? end.velocity : end?.kind === 'force' ? 0 : prescribed
   const freeLeft = leftBar === null ? outside : leftBar.velocity - leftBar.force * node.left
   const freeRight = rightBar === null ? outside : rightBar.velocity + rightBar.force * node.right

@@ -34,7 +34,7 @@ export interface FrontTrace {
  *
  *     dF = 2 (Y_left a_left + Y_right a_right)/(Y_left + Y_right + Y_joint)
  *
- * for fronts a arriving from both sides; dF - a goes back on each side.
+ * for fronts a arriving from both sides; dF - a goes back on each side. From a face with a mass a goes back.
  *
  * @param line the cut line
  * @param nodes what a front meets at each node
@@ -111,13 +111,13 @@ export function makeFrontTrace(
   }
 
   function scatter(step: number, meeting: Meeting): void {
-    const { left, right, joint } = nodes[meeting.node]
+    const { left, right, joint, heavy } = nodes[meeting.node]
     const { fromLeft, fromRight } = meeting
     if (fromLeft !== 0 || fromRight !== 0) lastArrival[meeting.node] = step
     const bonded = (2 * (weigh(left, fromLeft) + weigh(right, fromRight))) / (left + right + joint)
     const change = gates[meeting.node].limit(step, bonded)
-    send(step, meeting, 'left', change - fromLeft + meeting.emitLeft)
-    send(step, meeting, 'right', change - fromRight + meeting.emitRight)
+    send(step, meeting, 'left', (heavy ? fromLeft : change - fromLeft) + meeting.emitLeft)
+    send(step, meeting, 'right', (heavy ? fromRight : change - fromRight) + meeting.emitRight)
   }
 
   function isArriving(node: number, step: number): boolean {

@@ -1,14 +1,10 @@
 import type { NodeTrace } from '../../records/record'
 import type { FrontNode } from './frontNode'
 
-/** Share of the largest force under which a contact is open. */
-const FORCELESS = 1e-9
-
 /** What lets a change of force through at a node. */
 export interface Gate {
   /** Force at every step where it can open, else null [N]. */
   force: Float64Array | null
-  peak: number
   /**
    * The change of force that happens at a step, out of the one that closed faces would see [N].
    * Faces that part or meet at that step change by no more than the force recorded.
@@ -21,15 +17,14 @@ export interface Gate {
  *
  * @param node what a front meets there
  * @param trace the recorded force; null where it cannot open
+ * @param forceless force up to which a contact is open, over the rounding of the run [N]
  */
-export function makeGate(node: FrontNode, trace: NodeTrace | null): Gate {
-  if (trace === null || !node.canOpen) return { force: null, peak: 0, limit: (_step, change) => change }
+export function makeGate(node: FrontNode, trace: NodeTrace | null, forceless: number): Gate {
+  if (trace === null || !node.canOpen) return { force: null, limit: (_step, change) => change }
   const force = trace.forceLeft
-  const peak = force.reduce((largest, F) => Math.max(largest, Math.abs(F)), 0)
-  const isClosed = (step: number) => -force[step] > FORCELESS * peak
+  const isClosed = (step: number) => -force[step] > forceless
   return {
     force,
-    peak,
     limit(step, change) {
       if (change === 0) return 0
       const before = step > 0 && isClosed(step - 1)

@@ -18,6 +18,6 @@ export function runPlain(
   const run = makeWaveRun(line)
   const records = makeRecords(run, false)
   const march = makeMarch({ advance: (from, to) => advanceWaves(run, from, to) }, records, line.steps)
-  march.advance(line.steps)
+  march.advance(march.end)
   return { line, record: records.finish() }
 }

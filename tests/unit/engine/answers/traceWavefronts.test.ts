@@ -1,8 +1,8 @@
 import { describe, expect, it } from 'vitest'
 import type { Wavefront } from '../../../../src-main/contract/result'
-import type { Pulse } from '../../../../src-main/contract/rig'
+import type { End, Joint, Pulse } from '../../../../src-main/contract/rig'
 import { traceWavefronts } from '../../../../src-main/engine/answers/traceWavefronts'
-import { makePlainLine, STEEL, type PlainRig } from './makePlainLine'
+import { STEEL, type PlainRig } from './makePlainLine'
 import { runPlain } from './runPlain'
 
 const dt = 5e-6
@@ -21,7 +21,7 @@ function listJumps(fronts: Wavefront[], x: number, direction: 'right' | 'left'):
   const jumps = new Map<number, number>()
   for (const front of fronts) {
     const [low, high] = [Math.min(front.fromX, front.toX), Math.max(front.fromX, front.toX)]
-    if (front.direction !== direction || x <= low || x >= high) continue
+    if (front.direction !== direction || x < low - 1e-9 || x > high + 1e-9) continue
     const share = (x - front.fromX) / (front.toX - front.fromX)
     const step = Math.round((front.fromT + share * (front.toT - front.fromT)) / dt)
     jumps.set(step, (jumps.get(step) ?? 0) + front.force)
@@ -45,8 +45,7 @@ function expectFronts(
     ] as const) {
       const jumps = listJumps(fronts, trace.x, direction)
       let seen = 0
-      // A front that reaches the gauge with the last step has its line end there.
-      for (let k = 1; k < wave.length - 1; k++) {
+      for (let k = 1; k < wave.length; k++) {
         const recorded = (wave[k] - wave[k - 1]) / first
         if (Math.abs(recorded) > 1e-4) seen++
         expect(Math.abs(recorded - (jumps.get(k) ?? 0))).toBeLessThan(tolerance)
@@ -250,6 +249,24 @@ describe('fronts where the trace is by its own rules', () => {
     expect(second[0].fromT).toBeCloseTo(70e-6, 12)
   })
 
+  it('takes a wall that is never reached for a free end, whatever the rounding of its force', () => {
+    const plain: PlainRig = {
+      duration: 900e-6,
+      leftEnd: { kind: 'force', pulse: rectangle(7e3, 15e-6, 65e-6) },
+      bars: [
+        {
+          sections: [
+            { length: 0.3, diameter: 0.02 },
+            { length: 0.2, diameter: 0.0233 },
+          ],
+        },
+      ],
+    }
+    const gauges = [{ bar: 0, at: 0.1 }]
+    const free = expectFronts(plain, gauges, -7e3)
+    expect(expectFronts({ ...plain, rightEnd: { kind: 'wall', gap: 1 } }, gauges, -7e3)).toEqual(free)
+  })
+
   it('runs through a taper as one line that grows by sqrt(Z2/Z1) and is spread from there on', () => {
     const { line, record } = runPlain({
       dt,
@@ -299,8 +316,81 @@ describe('fronts where the trace is by its own rules', () => {
   })
 
   it('draws nothing where nothing happens', () => {
-    const line = makePlainLine({ bars: [{ velocity: 3, sections: [{ length: 0.2, diameter: 0.02 }] }] })
-    expect(traceWavefronts(line, { node: () => null })).toEqual([])
+    const { line, record } = runPlain({
+      dt,
+      bars: [{ velocity: 3, sections: [{ length: 0.2, diameter: 0.02 }] }],
+    })
+    expect(traceWavefronts(line, record)).toEqual([])
+  })
+
+  it.each<[string, End, number]>([
+    ['free', { kind: 'free' }, -1],
+    ['a force that stays', { kind: 'force', pulse: rectangle(0, 0, 1) }, -1],
+    ['fixed', { kind: 'fixed' }, 1],
+    ['a mass', { kind: 'mass', mass: 2, velocity: 0, joint: 'bonded', gap: 0 }, 1],
+    ['a spring', { kind: 'support', stiffness: 1e8, damping: 0, mass: 0, joint: 'bonded', gap: 0 }, -1],
+    [
+      'a mass on a spring',
+      { kind: 'support', stiffness: 1e8, damping: 9, mass: 1, joint: 'bonded', gap: 0 },
+      1,
+    ],
+    [
+      'a dashpot of 3 Z',
+      { kind: 'support', stiffness: 0, damping: 3 * Z, mass: 0, joint: 'bonded', gap: 0 },
+      0.5,
+    ],
+  ])('turns back from %s as (D - Z)/(D + Z)', (_, rightEnd, expected) => {
+    const leftEnd = { kind: 'force', pulse: rectangle(-1e4, 0, 1) } as const
+    const { line, record } = runPlain({
+      dt,
+      leftEnd,
+      rightEnd,
+      bars: [{ sections: [{ length: 0.3, diameter: 0.02 }] }],
+    })
+    const back = traceWavefronts(line, record)[1]
+    expect(back).toMatchObject({ direction: 'left', fromX: 0.3 })
+    expect(back.force).toBeCloseTo(expected, 13)
+  })
+
+  it.each<[string, Partial<Extract<Joint, { kind: 'cushion' }>>, number, number]>([
+    ['a spring', {}, -1, 0],
+    ['a dashpot of Z', { damping: Z }, -1 / 3, 2 / 3],
+    ['a mass on each face', { mass: 1 }, 1, 0],
+  ])('meets in a cushion with %s what moves at once', (_, change, back, through) => {
+    const cushion: Joint = {
+      kind: 'cushion',
+      stiffness: 1e8,
+      curve: null,
+      unloading: null,
+      damping: 0,
+      mass: 0,
+      gap: 0,
+      tension: true,
+      ...change,
+    }
+    const bar = { sections: [{ length: 0.3, diameter: 0.02 }] }
+    const leftEnd = { kind: 'force', pulse: rectangle(-1e4, 0, 1) } as const
+    const { line, record } = runPlain({ dt, leftEnd, bars: [bar, bar], joints: [cushion] })
+    const fronts = traceWavefronts(line, record)
+    const after = fronts.filter((front) => front.fromX === 0.3 && front.fromT < 70e-6)
+    expect(after.find((front) => front.direction === 'left')!.force).toBeCloseTo(back, 13)
+    expect(after.find((front) => front.direction === 'right')?.force ?? 0).toBeCloseTo(through, 13)
+  })
+
+  it("starts a hammer's blow and ends it where the front comes back from the free end", () => {
+    const leftEnd = { kind: 'mass', mass: 0.5, velocity: 6, joint: 'contact', gap: 0 } as const
+    const { line, record } = runPlain({
+      dt,
+      leftEnd,
+      bars: [{ sections: [{ length: 0.3, diameter: 0.02 }] }],
+    })
+    const fronts = traceWavefronts(line, record)
+    expect(fronts.map(({ force }) => force).slice(0, 2)).toEqual([1, -1])
+    // Far end free: the force, s0 exp(-Z t/M) by then, drops to zero at 2L/c (Love, art. 281, from memory).
+    const third = fronts[2]
+    expect(third.fromT).toBeCloseTo(120e-6, 12)
+    // Recorded force one step of 5 us before, by the midpoint rule: within 0.5 % of the first front.
+    expect(third.force).toBeCloseTo(1 - Math.exp((-Z * 120e-6) / 0.5), 2)
   })
 
   it('begins a smooth pulse at its onset', () => {
