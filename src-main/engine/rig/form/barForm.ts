@@ -24,6 +24,7 @@ function outline(what: string) {
         `${what} that changes along the section`,
       ),
     ])
+    .meta({ description: `${what}: a value, a formula, or a profile from one value to another` })
     .optional()
 }
 
@@ -50,6 +51,7 @@ export const sectionForm = strictForm(
     allowable: allowableForm.optional(),
   },
   'A section: its length and exactly one of diameter, area, stations',
+  'section',
 )
 
 export const barForm = strictForm(
@@ -69,4 +71,5 @@ export const barForm = strictForm(
     allowable: allowableForm.optional(),
   },
   'A bar',
+  'bar',
 )

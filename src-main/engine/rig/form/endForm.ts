@@ -1,6 +1,6 @@
 import { z } from 'zod'
 import { quantity, strictForm } from './fields'
-import { pulseForm } from './pulseForm'
+import { displacementPulseForm, forcePulseForm, velocityPulseForm } from './pulseForm'
 
 const joint = z.enum(['bonded', 'contact']).optional().meta({
   description:
@@ -14,15 +14,15 @@ export const endForm = z
     strictForm({ kind: z.literal('fixed') }, 'No motion'),
     strictForm({ kind: z.literal('matched') }, 'The bar goes on for ever'),
     strictForm(
-      { kind: z.literal('force'), pulse: pulseForm('force') },
+      { kind: z.literal('force'), pulse: forcePulseForm },
       'Force of the surroundings on the bar, positive to the right',
     ),
     strictForm(
-      { kind: z.literal('velocity'), pulse: pulseForm('velocity') },
+      { kind: z.literal('velocity'), pulse: velocityPulseForm },
       'Velocity of the end, positive to the right',
     ),
     strictForm(
-      { kind: z.literal('displacement'), pulse: pulseForm('length') },
+      { kind: z.literal('displacement'), pulse: displacementPulseForm },
       'Displacement of the end, positive to the right; it must not jump',
     ),
     strictForm(
@@ -62,4 +62,4 @@ export const endForm = z
       'A ground that the end goes into, compression only',
     ),
   ])
-  .meta({ description: 'An end prescribes a motion or a force, never both' })
+  .meta({ id: 'end', description: 'An end prescribes a motion or a force, never both' })

@@ -46,12 +46,13 @@ export function words(description: string) {
  * unknown one, where the check of the form takes them up for its hint.
  * @param shape a form for each key
  * @param description for the published schema
+ * @param id name by which the published schema refers to it; written out where left out
  */
-export function strictForm<Shape extends z.ZodRawShape>(shape: Shape, description: string) {
+export function strictForm<Shape extends z.ZodRawShape>(shape: Shape, description: string, id?: string) {
   const known = Object.keys(shape).join(' ')
   return z
     .strictObject(shape, { error: (issue) => (issue.code === 'unrecognized_keys' ? known : undefined) })
-    .meta({ description })
+    .meta(id === undefined ? { description } : { description, id })
 }
 
 /** Rows of two values each. */

@@ -10,43 +10,45 @@ const rate = {
   referenceRate: quantity('frequency', 'Strain rate at which the stress is as given').optional(),
 }
 
-const lawForm = z.discriminatedUnion('kind', [
-  strictForm(
-    { kind: z.literal('elastic'), modulus: quantity('stress', 'Modulus'), ...rate },
-    'Linear elastic',
-  ),
-  strictForm(
-    {
-      kind: z.literal('bilinear'),
-      modulus: quantity('stress', 'Modulus'),
-      yield: quantity('stress', 'Yield stress'),
-      hardening: quantity('stress', 'Tangent modulus after yield'),
-      ...rate,
-    },
-    'Elastic, then hardening',
-  ),
-  strictForm(
-    {
-      kind: z.literal('power'),
-      strength: quantity('stress', 'Stress at a strain of 1'),
-      exponent: plainNumber('Exponent of the strain'),
-      ...rate,
-    },
-    'stress = strength strain^exponent',
-  ),
-  strictForm(
-    {
-      kind: z.literal('curve'),
-      curve: pairs(
-        plainNumber('Strain'),
-        quantity('stress', 'Stress'),
-        'Rows of [strain, stress], strains rising',
-      ),
-      ...rate,
-    },
-    'A measured curve, linear between its rows',
-  ),
-])
+const lawForm = z
+  .discriminatedUnion('kind', [
+    strictForm(
+      { kind: z.literal('elastic'), modulus: quantity('stress', 'Modulus'), ...rate },
+      'Linear elastic',
+    ),
+    strictForm(
+      {
+        kind: z.literal('bilinear'),
+        modulus: quantity('stress', 'Modulus'),
+        yield: quantity('stress', 'Yield stress'),
+        hardening: quantity('stress', 'Tangent modulus after yield'),
+        ...rate,
+      },
+      'Elastic, then hardening',
+    ),
+    strictForm(
+      {
+        kind: z.literal('power'),
+        strength: quantity('stress', 'Stress at a strain of 1'),
+        exponent: plainNumber('Exponent of the strain'),
+        ...rate,
+      },
+      'stress = strength strain^exponent',
+    ),
+    strictForm(
+      {
+        kind: z.literal('curve'),
+        curve: pairs(
+          plainNumber('Strain'),
+          quantity('stress', 'Stress'),
+          'Rows of [strain, stress], strains rising',
+        ),
+        ...rate,
+      },
+      'A measured curve, linear between its rows',
+    ),
+  ])
+  .meta({ description: 'How the stress of the specimen follows from its strain' })
 
 export const jointForm = z
   .discriminatedUnion('kind', [
@@ -80,4 +82,4 @@ export const jointForm = z
       'A short piece of another material between two bars',
     ),
   ])
-  .meta({ description: 'What connects a bar to the next' })
+  .meta({ id: 'joint', description: 'What connects a bar to the next' })

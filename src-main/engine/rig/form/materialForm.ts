@@ -7,6 +7,7 @@ export const allowableForm = strictForm(
     compression: quantity('stress', 'Largest compressive stress allowed, a positive value').optional(),
   },
   'Stresses that may not be passed. A value at a section goes before that of its bar, and that before the material.',
+  'allowable',
 )
 
 export const materialForm = strictForm(
@@ -33,4 +34,5 @@ export const materialForm = strictForm(
     source: words('Where the numbers come from').optional(),
   },
   'A linear elastic material with what may be known beyond that',
+  'material',
 )

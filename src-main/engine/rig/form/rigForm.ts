@@ -4,7 +4,7 @@ import { endForm } from './endForm'
 import { plainNumber, quantity, strictForm, words } from './fields'
 import { jointForm } from './jointForm'
 import { materialForm } from './materialForm'
-import { pulseForm } from './pulseForm'
+import { forcePulseForm } from './pulseForm'
 import { studyForm } from './studyForm'
 
 /** The word that a rig file of this version begins with. */
@@ -32,6 +32,7 @@ export const gaugeForm = strictForm(
     ).optional(),
   },
   'A strain gauge station',
+  'gauge',
 )
 
 const flag = (description: string) => z.boolean().optional().meta({ description })
@@ -51,6 +52,7 @@ const runForm = strictForm(
     spall: flag('Bars come apart where the tension reaches the spall stress'),
   },
   'How it is computed',
+  'run',
 )
 
 /** The form of a rig file: which keys stand where. What its values mean is checked after it. */
@@ -77,20 +79,21 @@ export const rigForm = strictForm(
           {
             bar: words('Name of a bar'),
             at: quantity('length', "Distance from the bar's left face"),
-            pulse: pulseForm('force'),
+            pulse: forcePulseForm,
           },
           'An axial force on the bar, positive to the right',
         ),
       )
-      .optional(),
+      .optional()
+      .meta({ description: 'Forces at points of the bars' }),
     gravity: quantity('acceleration', 'Acceleration along x, for a rig that does not lie level').optional(),
-    gauges: z.array(gaugeForm).optional(),
+    gauges: z.array(gaugeForm).optional().meta({ description: 'Where the bars are watched' }),
     margins: strictForm(
       { factorOfSafety: plainNumber('Factor of safety; 1 where left out').optional() },
       'How margins are reckoned',
     ).optional(),
     run: runForm,
-    studies: z.array(studyForm).optional(),
+    studies: z.array(studyForm).optional().meta({ description: 'Studies that vary the rig' }),
   },
   'A line of bars, read from left to right',
 )

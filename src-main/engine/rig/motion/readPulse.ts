@@ -1,7 +1,6 @@
-import type { z } from 'zod'
 import type { Pulse } from '../../../contract/rig'
 import { faultText } from '../faultText'
-import type { pulseForm } from '../form/pulseForm'
+import type { AnyPulseForm } from '../form/pulseForm'
 import type { Loose } from '../form/loose'
 import type { DimensionName } from '../formula/dimension'
 import { LIMITS } from '../limits'
@@ -22,7 +21,7 @@ import type { Columns } from './readPairs'
 import { readPairs } from './readPairs'
 import { readRecordFile } from './readRecordFile'
 
-export type PulseForm = Loose<z.infer<ReturnType<typeof pulseForm>>>
+export type PulseForm = Loose<AnyPulseForm>
 
 /**
  * Reads a prescribed history.
