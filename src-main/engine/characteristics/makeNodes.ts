@@ -4,7 +4,7 @@ import { makeBonded } from '../laws/bonded'
 import { makeEnd } from '../laws/makeEnd'
 import { makeJoint } from '../laws/makeJoint'
 import { Outside } from '../laws/outside'
-import type { Beat, Body, Hand, NodeLaw } from '../laws/side'
+import { type Body, type Hand, makeBeat, type NodeLaw } from '../laws/side'
 import { evaluateInitial } from '../line/evaluateInitial'
 import type { Line } from '../line/line'
 import type { LiveBlock, LiveNode, WaveRun } from './waveRun'
@@ -16,7 +16,7 @@ type Nodes = Pick<WaveRun, 'nodes' | 'bodies' | 'outside' | 'beat'>
  * between two blocks.
  */
 export function makeNodes(line: Line, blocks: readonly LiveBlock[]): Nodes {
-  const beat: Beat = { dt: line.dt, gravity: line.rig.gravity, alpha: 1 }
+  const beat = makeBeat(line.dt, line.rig.gravity, 'characteristics')
   const outside = { left: new Outside(beat), right: new Outside(beat), loads: [] as Outside[] }
   const bodies: Body[] = []
   const nodes: LiveNode[] = []

@@ -22,11 +22,11 @@ export interface Port {
  */
 export function makeBarSide(port: Port, hand: Hand): Side {
   const { arriving, leaving, leavingOffset } = port
-  const admittance = 1 / port.impedance
+  const Y = 1 / port.impedance
   let last = 0
   return {
-    admittance,
-    freeVelocity: (k) => -hand * 2 * arriving[k] * admittance,
+    admittance: () => Y,
+    freeVelocity: (k) => -hand * 2 * arriving[k] * Y,
     lastVelocity: () => last,
     take(k, force, velocity) {
       leaving[k + leavingOffset] = force - arriving[k]

@@ -21,7 +21,7 @@ export function makeMass(mass: number, velocity: number, beat: Beat): Body {
   let last = velocity
   return {
     mass,
-    admittance: (reach * beat.dt) / mass,
+    admittance: (k) => (reach * beat.duration(k)) / mass,
     freeVelocity: () => V,
     lastVelocity: () => last,
     take(_k, _force, faceVelocity) {
@@ -50,9 +50,9 @@ export function makeSupport(
   const { stiffness: K, damping: D, mass } = support
   const { dt, gravity, alpha } = beat
   const reach = evaluateReach(beat)
-  const Zm = mass / (reach * dt)
-  const Zg = D + (K * dt) / 2
-  const admittance = 1 / (Zm + alpha * Zg)
+  const Zm = (k: number) => mass / (reach * beat.duration(k))
+  const Zg = (k: number) => D + (K * beat.duration(k)) / 2
+  const admittance = (k: number) => 1 / (Zm(k) + alpha * Zg(k))
   const lost = new CompensatedSum()
   let V = 0
   let S = 0
@@ -61,15 +61,16 @@ export function makeSupport(
   return {
     mass,
     admittance,
-    freeVelocity: (k) => (Zm * V - S - Zg * (fall(k) + (1 - alpha) * last)) * admittance,
+    freeVelocity: (k) => (Zm(k) * V - S - Zg(k) * (fall(k) + (1 - alpha) * last)) * admittance(k),
     lastVelocity: () => last,
     take(k, _force, velocity) {
       const v = evaluateWorking(beat, velocity, last) + fall(k)
       const before = S
-      S += K * dt * v
+      const duration = beat.duration(k)
+      S += K * duration * v
       if (mass > 0) V += (velocity - V) / reach
       last = velocity
-      lost.add(D * v * v * dt)
+      lost.add(D * v * v * duration)
       outside.add(k, -(before + S) / 2 - D * v, -fall(k))
     },
     kinetic: (frame) => (mass * (V + frame) ** 2) / 2,
@@ -93,8 +94,8 @@ export function makeMotion(
 ): Side {
   let last = velocity(0)
   return {
-    admittance: 0,
-    freeVelocity: (k) => velocity(k) - beat.gravity * beat.dt * k,
+    admittance: () => 0,
+    freeVelocity: (k) => velocity(k) - beat.gravity * beat.dt * (k + 1 - beat.alpha),
     lastVelocity: () => last,
     take(k, force, v) {
       outside.add(k, -hand * force, evaluateWorking(beat, v, last))
@@ -119,12 +120,11 @@ export function makeMatched(
   beat: Beat,
   outside: Outside,
 ): Side {
-  const admittance = 1 / impedance
   const { alpha } = beat
   let last = velocity
   return {
-    admittance: admittance / alpha,
-    freeVelocity: () => (-hand * 2 * arriving * admittance - (1 - alpha) * last) / alpha,
+    admittance: () => 1 / (alpha * impedance),
+    freeVelocity: () => ((-hand * 2 * arriving) / impedance - (1 - alpha) * last) / alpha,
     lastVelocity: () => last,
     take(k, force, v) {
       outside.add(k, -hand * force, evaluateWorking(beat, v, last))

@@ -55,16 +55,16 @@ export function makeBonded(
  * With elements, sides that start at different velocities are brought together at a loss.
  */
 export function makeBond(left: Side, right: Side, beat: Beat): NodeLaw {
-  const Y = left.admittance + right.admittance
   const lost = new CompensatedSum()
   return {
     advance(from, to) {
       for (let k = from; k < to; k++) {
         const v0 = left.freeVelocity(k)
-        const F = (right.freeVelocity(k) - v0) / Y
-        const v = v0 + left.admittance * F
+        const Y = left.admittance(k)
+        const F = (right.freeVelocity(k) - v0) / (Y + right.admittance(k))
+        const v = v0 + Y * F
         const parting = evaluateWorking(beat, 0, right.lastVelocity() - left.lastVelocity())
-        if (parting !== 0) lost.add(beat.dt * F * parting)
+        if (parting !== 0) lost.add(beat.duration(k) * F * parting)
         left.take(k, F, v)
         right.take(k, F, v)
       }

@@ -11,7 +11,6 @@ import { type Beat, evaluateWorking, type NodeLaw, type Side } from './side'
  */
 export function makeContact(left: Side, right: Side, gap: number, beat: Beat): NodeLaw {
   const { dt } = beat
-  const Y = left.admittance + right.admittance
   const lost = new CompensatedSum()
   let d = gap
   return {
@@ -25,12 +24,14 @@ export function makeContact(left: Side, right: Side, gap: number, beat: Beat): N
           left.take(k, 0, vl)
           right.take(k, 0, vr)
         } else {
-          const F = apart / (dt * Y)
+          const Yl = left.admittance(k)
+          const Yr = right.admittance(k)
+          const F = apart / (dt * (Yl + Yr))
           const parting = evaluateWorking(beat, -d / dt, right.lastVelocity() - left.lastVelocity())
-          if (parting !== 0) lost.add(dt * F * parting)
+          if (parting !== 0) lost.add(beat.duration(k) * F * parting)
           d = 0
-          left.take(k, F, vl + left.admittance * F)
-          right.take(k, F, vr - right.admittance * F)
+          left.take(k, F, vl + Yl * F)
+          right.take(k, F, vr - Yr * F)
         }
       }
     },

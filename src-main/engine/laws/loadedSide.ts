@@ -9,17 +9,17 @@ import type { Beat, Body, Hand, Side } from './side'
  */
 export function makeLoadedSide(side: Side, hand: Hand, mass: number, beat: Beat): Body {
   const reach = 1 / (2 * beat.alpha)
-  const Zm = mass / (reach * beat.dt)
-  const Zs = 1 / side.admittance
-  const admittance = 1 / (Zm + Zs)
+  const Zm = (k: number) => mass / (reach * beat.duration(k))
+  const Zs = (k: number) => 1 / side.admittance(k)
+  const admittance = (k: number) => 1 / (Zm(k) + Zs(k))
   let V = side.lastVelocity()
   return {
     mass,
     admittance,
-    freeVelocity: (k) => (Zm * V + Zs * side.freeVelocity(k)) * admittance,
+    freeVelocity: (k) => (Zm(k) * V + Zs(k) * side.freeVelocity(k)) * admittance(k),
     lastVelocity: () => side.lastVelocity(),
     take(k, _force, velocity) {
-      const onSide = hand * Zs * (velocity - side.freeVelocity(k))
+      const onSide = hand * Zs(k) * (velocity - side.freeVelocity(k))
       V += (velocity - V) / reach
       side.take(k, onSide, velocity)
     },

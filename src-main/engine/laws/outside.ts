@@ -22,8 +22,9 @@ export class Outside {
    */
   add(k: number, force: number, velocity: number): void {
     const { dt, gravity } = this.beat
-    this.impulses.add(dt * force)
-    this.works.add(dt * force * (velocity + gravity * dt * k))
+    const duration = this.beat.duration(k)
+    this.impulses.add(duration * force)
+    this.works.add(duration * force * (velocity + gravity * dt * k))
     if (gravity !== 0) this.held.add(this.impulses.value)
     this.steps = k + 1
   }

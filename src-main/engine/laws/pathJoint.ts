@@ -28,24 +28,22 @@ export function makePathJoint(
   options: JointOptions,
   beat: Beat,
 ): NodeLaw {
-  const { dt, alpha } = beat
+  const { alpha } = beat
   const { damping, pulls, hurry } = options
-  const Y = left.admittance + right.admittance
   const lost = new CompensatedSum()
 
-  /** Force of the joint if its closing moves to `to` over the step. */
-  function evaluateForce(to: number): number {
-    const rate = (to - law.closing) / dt
+  /** Force of the joint if its closing moves to `to` over a step of the given duration. */
+  function evaluateForce(to: number, duration: number): number {
+    const rate = (to - law.closing) / duration
     const speed = hurry !== undefined && rate > 0 && law.loads(to) ? hurry(rate) : 1
     const C = law.mean(to) * speed + damping * rate
     return pulls ? C : Math.max(0, C)
   }
 
-  /** Solves `to = free - alpha dt Y C(to)`, C rising with `to`: false position kept from stalling (Illinois). */
-  function solveClosing(free: number): number {
-    const give = alpha * dt * Y
-    const residual = (to: number) => to - free + give * evaluateForce(to)
-    const first = give * evaluateForce(free)
+  /** Solves `to = free - give C(to)`, C rising with `to`: false position kept from stalling (Illinois). */
+  function solveClosing(free: number, give: number, duration: number): number {
+    const residual = (to: number) => to - free + give * evaluateForce(to, duration)
+    const first = give * evaluateForce(free, duration)
     if (first === 0) return free
     let a = free
     let ra = first
@@ -75,16 +73,20 @@ export function makePathJoint(
         const vl = left.freeVelocity(k)
         const vr = right.freeVelocity(k)
         const before = right.lastVelocity() - left.lastVelocity()
+        const Yl = left.admittance(k)
+        const Yr = right.admittance(k)
+        const duration = beat.duration(k)
+        const give = alpha * duration * (Yl + Yr)
         const start = law.closing
-        const free = start - dt * evaluateWorking(beat, vr - vl, before)
-        const closing = solveClosing(free)
+        const free = start - duration * evaluateWorking(beat, vr - vl, before)
+        const closing = solveClosing(free, give, duration)
         // From the motion, not from the law: exact also where the law is steep or jumps.
-        const F = -(free - closing) / (alpha * dt * Y)
+        const F = -(free - closing) / give
         const stored = law.stored()
         law.moveTo(closing)
         lost.add(-F * (closing - start) - (law.stored() - stored))
-        left.take(k, F, vl + left.admittance * F)
-        right.take(k, F, vr - right.admittance * F)
+        left.take(k, F, vl + Yl * F)
+        right.take(k, F, vr - Yr * F)
       }
     },
     strain: () => law.stored(),

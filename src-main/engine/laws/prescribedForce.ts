@@ -22,7 +22,7 @@ export function makePrescribedForce(
       for (let k = from; k < to; k++) {
         const T = force(k)
         const F = hand * T
-        const v = bar.freeVelocity(k) + hand * bar.admittance * F
+        const v = bar.freeVelocity(k) + hand * bar.admittance(k) * F
         outside.add(k, T, evaluateWorking(beat, v, bar.lastVelocity()))
         bar.take(k, F, v)
       }

@@ -11,8 +11,8 @@
  * in it; only what is held by the ground knows the difference.
  */
 export interface Side {
-  /** 1/Z [s/kg] */
-  admittance: number
+  /** 1/Z at step k [s/kg] */
+  admittance(k: number): number
   /** Velocity at step k if no force acted [m/s]. */
   freeVelocity(k: number): number
   /** Velocity that `take` was last given, or the initial one [m/s]. */
@@ -58,6 +58,17 @@ export interface Beat {
    * elements, whose velocity at step k is that at t_k + dt/2.
    */
   alpha: number
+  /**
+   * Time over which the force of step k works [s]: dt, but half of it in the first step of elements,
+   * whose velocity goes from that at 0 to that at dt/2.
+   */
+  duration(k: number): number
+}
+
+/** Makes the beat of a run by characteristics, or of one with elements. */
+export function makeBeat(dt: number, gravity: number, method: 'characteristics' | 'elements'): Beat {
+  if (method === 'characteristics') return { dt, gravity, alpha: 1, duration: () => dt }
+  return { dt, gravity, alpha: 0.5, duration: (k) => (k === 0 ? dt / 2 : dt) }
 }
 
 /** Velocity at which the force of a step works [m/s]: see `Beat.alpha`. */
