@@ -11,8 +11,7 @@ import { tabulateEnvelope } from './answers/tabulateEnvelope'
 import { tabulateGauges } from './answers/tabulateGauges'
 import { tabulateEnds, tabulateJoints } from './answers/tabulateJoints'
 import { traceWavefronts } from './answers/traceWavefronts'
-import { advanceWaves } from './characteristics/advanceWaves'
-import { makeWaveRun } from './characteristics/makeWaveRun'
+import { makeWaveMethod } from './characteristics/makeWaveMethod'
 import { makeLine } from './line/makeLine'
 import type { Line } from './line/line'
 import { makeMarch } from './march/march'
@@ -46,9 +45,9 @@ export interface Solve {
  */
 export function makeSolve(rig: Rig, options: { full?: boolean } = {}): Solve {
   const line = makeLine(rig)
-  const run = makeWaveRun(line)
+  const run = makeWaveMethod(line)
   const records = makeRecords(run, options.full ?? false)
-  const march = makeMarch({ advance: (from, to) => advanceWaves(run, from, to) }, records, line.steps)
+  const march = makeMarch(run, records, line.steps)
   return {
     line,
     get step() {

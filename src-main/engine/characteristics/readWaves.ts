@@ -1,17 +1,7 @@
 import { gradedKernel } from './gradedKernel'
 import { WIDENING } from './widening'
+import type { SpanExtremes, SpanTrace, Stock } from '../march/methodRun'
 import type { LiveBlock, WaveRun } from './waveRun'
-
-/** Energy and momentum in a block between two steps. */
-export interface BlockState {
-  /** [J] */
-  kinetic: number
-  strain: number
-  /** In the falling frame [kg m/s]. */
-  momentum: number
-  /** Mass of its cells, sum of Z dt [kg]. */
-  mass: number
-}
 
 /**
  * Sums a block's cells after step k (k = -1: before the first): kinetic `dt (g - f + Z G)^2 / 2 Z`,
@@ -19,7 +9,7 @@ export interface BlockState {
  *
  * @param frame velocity G of the falling frame [m/s]
  */
-export function sumBlock(run: WaveRun, block: LiveBlock, k: number, frame: number): BlockState {
+export function sumBlock(run: WaveRun, block: LiveBlock, k: number, frame: number): Stock {
   const { dt } = run.line
   const { cells: n, impedance, delay, slot } = block
   let kinetic = 0
@@ -54,7 +44,13 @@ export function sumBlock(run: WaveRun, block: LiveBlock, k: number, frame: numbe
       mass += Z
     }
   }
-  return { kinetic: (dt * kinetic) / 2, strain: (dt * strain) / 2, momentum: dt * momentum, mass: dt * mass }
+  return {
+    kinetic: (dt * kinetic) / 2,
+    strain: (dt * strain) / 2,
+    dissipated: 0,
+    momentum: dt * momentum,
+    mass: dt * mass,
+  }
 }
 
 /**
@@ -81,10 +77,7 @@ function evaluateInner(block: LiveBlock, position: number): number {
 }
 
 /** Largest tension and compression of a block at each position, with the steps, shape (cells + 1). */
-export function readEnvelope(
-  run: WaveRun,
-  block: LiveBlock,
-): { high: Float64Array; low: Float64Array; highStep: Int32Array; lowStep: Int32Array } {
+export function readExtremes(run: WaveRun, block: LiveBlock): SpanExtremes {
   const narrow = (values: Float64Array) => values.map((value) => value / WIDENING)
   if (block.delay) {
     const { envelope } = block.delay
@@ -101,11 +94,7 @@ export function readEnvelope(
  * Force and velocity (falling frame) at a position of a block over the whole run, shape (steps + 1).
  * An inner position of a graded block must have a probe.
  */
-export function readTrace(
-  run: WaveRun,
-  block: LiveBlock,
-  position: number,
-): { force: Float64Array; velocity: Float64Array } {
+export function readTrace(run: WaveRun, block: LiveBlock, position: number): SpanTrace {
   const probe = block.probes.find((one) => one.position === position)
   if (probe) return probe
   const count = run.line.steps + 1

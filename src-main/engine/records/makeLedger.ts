@@ -1,15 +1,16 @@
-import { sumBlock } from '../characteristics/readWaves'
-import type { WaveRun } from '../characteristics/waveRun'
+import type { MethodRun } from '../march/methodRun'
 import type { EnergyLedger } from './record'
 
 /** Energy and momentum of a whole run at one moment. */
-interface Stock {
+interface Balance {
   kinetic: number
   strain: number
   dissipated: number
   work: number
   momentum: number
   impulse: number
+  /** Size of the momenta at play, signs apart. */
+  scale: number
 }
 
 /** Keeps the energy and momentum ledgers of a run at the sampled steps. */
@@ -26,7 +27,7 @@ export interface Ledger {
  *
  * @param steps sampled steps, ascending
  */
-export function makeLedger(run: WaveRun, steps: Int32Array): Ledger {
+export function makeLedger(run: MethodRun, steps: Int32Array): Ledger {
   const count = steps.length
   const kinetic = new Float64Array(count)
   const strain = new Float64Array(count)
@@ -67,8 +68,8 @@ export function makeLedger(run: WaveRun, steps: Int32Array): Ledger {
 }
 
 /** Mass that falls with gravity: the bars' cells and the bodies at the ends [kg]. */
-function sumMass(run: WaveRun): number {
-  const bars = run.blocks.reduce((sum, block) => sum + sumBlock(run, block, -1, 0).mass, 0)
+function sumMass(run: MethodRun): number {
+  const bars = run.line.bars.reduce((sum, _, bar) => sum + run.sumBar(bar, -1, 0).mass, 0)
   return run.bodies.reduce((sum, body) => sum + body.mass, bars)
 }
 
@@ -77,17 +78,18 @@ function sumMass(run: WaveRun): number {
  * momentum in the frame of the ground halfway between two steps.
  */
 function takeStock(
-  run: WaveRun,
+  run: MethodRun,
   k: number,
   start: { momentum: number; mass: number } | null,
-): Stock & { scale: number } {
+): Balance {
   const { dt, rig } = run.line
   const frame = start === null ? 0 : rig.gravity * dt * k
   const stock = { kinetic: 0, strain: 0, dissipated: 0, work: 0, momentum: 0, impulse: 0, scale: 0 }
-  for (const block of run.blocks) {
-    const state = sumBlock(run, block, k, frame)
+  for (let bar = 0; bar < run.line.bars.length; bar++) {
+    const state = run.sumBar(bar, k, frame)
     stock.kinetic += state.kinetic
     stock.strain += state.strain
+    stock.dissipated += state.dissipated
     stock.momentum += state.momentum
     stock.scale += Math.sqrt(2 * state.kinetic * state.mass)
   }
@@ -98,9 +100,9 @@ function takeStock(
     stock.momentum += body.momentum()
     stock.scale += Math.sqrt(2 * body.kinetic(frame) * body.mass)
   }
-  for (const node of run.nodes) {
-    stock.strain += node.law.strain()
-    stock.dissipated += node.law.dissipated()
+  for (const law of run.laws.values()) {
+    stock.strain += law.strain()
+    stock.dissipated += law.dissipated()
   }
   for (const outside of [run.outside.left, run.outside.right, ...run.outside.loads]) {
     stock.work += outside.work

@@ -1,3 +1,7 @@
+import type { NodeTrace } from '../march/methodRun'
+
+export type { NodeTrace }
+
 /** Largest forces at every position of every span; the positions of span i start at `start[i]`. */
 export interface ForceEnvelope {
   /** First position of each span, and the total count at the end: shape (spans + 1). */
@@ -9,16 +13,6 @@ export interface ForceEnvelope {
   /** Largest compression, zero or negative [N]. */
   compression: Float64Array
   compressionStep: Int32Array
-}
-
-/** The motion and the force on both sides of a node at every step, shape (steps + 1) each. */
-export interface NodeTrace {
-  /** [N] tension positive */
-  forceLeft: Float64Array
-  forceRight: Float64Array
-  /** [m/s] */
-  velocityLeft: Float64Array
-  velocityRight: Float64Array
 }
 
 /** What passes a place of a bar at every step, shape (steps + 1) each. */

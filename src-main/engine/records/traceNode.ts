@@ -1,31 +1,19 @@
-import { readTrace } from '../characteristics/readWaves'
-import type { WaveRun } from '../characteristics/waveRun'
+import type { MethodRun } from '../march/methodRun'
 import type { EndRecord, NodeTrace } from './record'
 
 /**
- * Traces both sides of a node that has a law of its own over the whole run. Outside an end both
- * sides read the bar's face.
+ * Traces both sides of a node that has a law of its own over the whole run, in the frame of the
+ * ground. Outside an end both sides read the bar's face.
  *
  * @param index of the line's node
- * @returns null at a step inside a graded block
+ * @returns null at a node without a law
  */
-export function traceNode(run: WaveRun, index: number): NodeTrace | null {
-  const node = run.nodes.find((one) => one.index === index)
-  if (!node) return null
-  const readFace = (block: number, face: 'left' | 'right') => {
-    const live = run.blocks[block]
-    const { force, velocity } = readTrace(run, live, face === 'left' ? 0 : live.cells)
-    const fall = run.line.rig.gravity * run.line.dt
-    return { force, velocity: fall === 0 ? velocity : velocity.map((v, k) => v + fall * k) }
-  }
-  const left = node.leftBlock >= 0 ? readFace(node.leftBlock, 'right') : readFace(node.rightBlock, 'left')
-  const right = node.rightBlock >= 0 ? readFace(node.rightBlock, 'left') : left
-  return {
-    forceLeft: left.force,
-    velocityLeft: left.velocity,
-    forceRight: right.force,
-    velocityRight: right.velocity,
-  }
+export function traceNode(run: MethodRun, index: number): NodeTrace | null {
+  const trace = run.readNode(index)
+  const { gravity, dt } = run.beat
+  if (trace === null || gravity === 0) return trace
+  const add = (velocity: Float64Array) => velocity.map((v, k) => v + gravity * dt * k)
+  return { ...trace, velocityLeft: add(trace.velocityLeft), velocityRight: add(trace.velocityRight) }
 }
 
 /**

@@ -1,7 +1,6 @@
-import { readTrace } from '../characteristics/readWaves'
-import type { LiveBlock, WaveRun } from '../characteristics/waveRun'
 import type { Gauge } from '../../contract/rig'
 import type { Line } from '../line/line'
+import type { MethodRun } from '../march/methodRun'
 import type { PlaceTrace } from './record'
 
 /** Where a gauge lies: between positions `position` and `position + 1` of a span, `share` of the way. */
@@ -29,18 +28,12 @@ export function findSpot(line: Line, gauge: Gauge): Spot {
   return { span, position: Math.floor(along), share: along - Math.floor(along) }
 }
 
-/** Asks graded blocks to keep the histories that a gauge will need; call before the first step. */
-export function addProbes(run: WaveRun): void {
+/** Asks for the histories that the gauges will need; call before the first step. */
+export function addProbes(run: MethodRun): void {
   for (const gauge of run.line.rig.gauges) {
-    const spot = findSpot(run.line, gauge)
-    const block = findBlock(run, spot.span)
-    const first = block.spanStart[spot.span - block.firstSpan] + spot.position
-    for (const position of spot.share > 0 ? [first, first + 1] : [first]) {
-      const inner = block.delay === null && position > 0 && position < block.cells
-      if (!inner || block.probes.some((probe) => probe.position === position)) continue
-      const count = run.line.steps + 1
-      block.probes.push({ position, force: new Float64Array(count), velocity: new Float64Array(count) })
-    }
+    const { span, position, share } = findSpot(run.line, gauge)
+    run.addProbe(span, position)
+    if (share > 0) run.addProbe(span, position + 1)
   }
 }
 
@@ -48,14 +41,12 @@ export function addProbes(run: WaveRun): void {
  * Traces a gauge over the whole run. Between two positions force and velocity are interpolated
  * linearly, which is second order in the cell for a smooth wave and spreads a sharp front over one step.
  */
-export function traceGauge(run: WaveRun, gauge: Gauge): PlaceTrace {
+export function traceGauge(run: MethodRun, gauge: Gauge): PlaceTrace {
   const { line } = run
   const { span: index, position, share } = findSpot(line, gauge)
   const span = line.spans[index]
-  const block = findBlock(run, index)
-  const first = block.spanStart[index - block.firstSpan] + position
-  const here = readTrace(run, block, first)
-  const there = share > 0 ? readTrace(run, block, first + 1) : here
+  const here = run.readTrace(index, position)
+  const there = share > 0 ? run.readTrace(index, position + 1) : here
   const s = span.sFrom + ((span.sTo - span.sFrom) * (position + share)) / span.cells
   const { material, shape } = span.source
   const area = shape.area(s)
@@ -80,8 +71,4 @@ export function traceGauge(run: WaveRun, gauge: Gauge): PlaceTrace {
     trace.leftgoing[k] = (F + Z * v) / 2
   }
   return trace
-}
-
-function findBlock(run: WaveRun, span: number): LiveBlock {
-  return run.blocks.find((block) => span >= block.firstSpan && span <= block.lastSpan)!
 }

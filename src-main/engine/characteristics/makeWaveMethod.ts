@@ -1,0 +1,89 @@
+import type { Line } from '../line/line'
+import type { MethodRun, NodeTrace, SpanExtremes, Stock } from '../march/methodRun'
+import { advanceWaves } from './advanceWaves'
+import { makeWaveRun } from './makeWaveRun'
+import { readExtremes, readForce, readTrace, sumBlock } from './readWaves'
+import type { WaveRun } from './waveRun'
+
+/**
+ * Sets up a line for the method of characteristics.
+ *
+ * @param line the cut line
+ */
+export function makeWaveMethod(line: Line): MethodRun {
+  const run = makeWaveRun(line)
+  const seat = (span: number, position: number) => {
+    const block = run.blocks.find((one) => span >= one.firstSpan && span <= one.lastSpan)!
+    return { block, at: block.spanStart[span - block.firstSpan] + position }
+  }
+  return {
+    line,
+    beat: run.beat,
+    laws: new Map(run.nodes.map((node) => [node.index, node.law])),
+    bodies: run.bodies,
+    outside: run.outside,
+    advance: (from, to) => advanceWaves(run, from, to),
+    sumBar: (bar, k, frame) => sumBar(run, bar, k, frame),
+    readForce(span, position, k) {
+      const { block, at } = seat(span, position)
+      return readForce(block, at, k)
+    },
+    readExtremes: (span) => cutExtremes(run, span),
+    addProbe(span, position) {
+      const { block, at } = seat(span, position)
+      const inner = block.delay === null && at > 0 && at < block.cells
+      if (!inner || block.probes.some((probe) => probe.position === at)) return
+      const count = line.steps + 1
+      block.probes.push({ position: at, force: new Float64Array(count), velocity: new Float64Array(count) })
+    },
+    readTrace(span, position) {
+      const { block, at } = seat(span, position)
+      return readTrace(run, block, at)
+    },
+    readNode: (node) => readNode(run, node),
+  }
+}
+
+function sumBar(run: WaveRun, bar: number, k: number, frame: number): Stock {
+  const sum: Stock = { kinetic: 0, strain: 0, dissipated: 0, momentum: 0, mass: 0 }
+  for (const block of run.blocks) {
+    if (block.bar !== bar) continue
+    const stock = sumBlock(run, block, k, frame)
+    sum.kinetic += stock.kinetic
+    sum.strain += stock.strain
+    sum.momentum += stock.momentum
+    sum.mass += stock.mass
+  }
+  return sum
+}
+
+function cutExtremes(run: WaveRun, span: number): SpanExtremes {
+  const block = run.blocks.find((one) => span >= one.firstSpan && span <= one.lastSpan)!
+  const { high, low, highStep, lowStep } = readExtremes(run, block)
+  const from = block.spanStart[span - block.firstSpan]
+  const to = from + run.line.spans[span].cells + 1
+  return {
+    high: high.subarray(from, to),
+    low: low.subarray(from, to),
+    highStep: highStep.subarray(from, to),
+    lowStep: lowStep.subarray(from, to),
+  }
+}
+
+/** Both sides of a node with a law; outside an end both read the bar's face. */
+function readNode(run: WaveRun, index: number): NodeTrace | null {
+  const node = run.nodes.find((one) => one.index === index)
+  if (!node) return null
+  const readFace = (block: number, face: 'left' | 'right') => {
+    const live = run.blocks[block]
+    return readTrace(run, live, face === 'left' ? 0 : live.cells)
+  }
+  const left = node.leftBlock >= 0 ? readFace(node.leftBlock, 'right') : readFace(node.rightBlock, 'left')
+  const right = node.rightBlock >= 0 ? readFace(node.rightBlock, 'left') : left
+  return {
+    forceLeft: left.force,
+    velocityLeft: left.velocity,
+    forceRight: right.force,
+    velocityRight: right.velocity,
+  }
+}

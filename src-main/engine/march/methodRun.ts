@@ -1,0 +1,69 @@
+import type { Outside } from '../laws/outside'
+import type { Beat, Body, NodeLaw } from '../laws/side'
+import type { Line } from '../line/line'
+import type { Method } from './march'
+
+/** Energy and momentum in a stretch of bar between two steps. */
+export interface Stock {
+  /** [J] */
+  kinetic: number
+  strain: number
+  /** Energy its material has taken and will not give back [J]. */
+  dissipated: number
+  /** In the falling frame [kg m/s]. */
+  momentum: number
+  /** [kg] */
+  mass: number
+}
+
+/** Largest and smallest force at each position of a span, with the steps, shape (cells + 1) each. */
+export interface SpanExtremes {
+  high: Float64Array
+  low: Float64Array
+  highStep: Int32Array
+  lowStep: Int32Array
+}
+
+/** Force [N] and velocity in the falling frame [m/s] at a position over the run, shape (steps + 1). */
+export interface SpanTrace {
+  force: Float64Array
+  velocity: Float64Array
+}
+
+/** The motion and the force on both sides of a node at every step, shape (steps + 1) each. */
+export interface NodeTrace {
+  /** [N] tension positive */
+  forceLeft: Float64Array
+  forceRight: Float64Array
+  /** [m/s] */
+  velocityLeft: Float64Array
+  velocityRight: Float64Array
+}
+
+/** A line under way by either method, as the records read it. */
+export interface MethodRun extends Method {
+  line: Line
+  beat: Beat
+  /** Laws by the line's node; nodes without a law of their own are not in it. */
+  laws: Map<number, NodeLaw>
+  /** Rigid bodies that move with the line. */
+  bodies: Body[]
+  outside: { left: Outside; right: Outside; loads: Outside[] }
+
+  /**
+   * Sums a bar after step k (k = -1: before the first). Steps other than the latest only where the
+   * method keeps them.
+   *
+   * @param frame velocity of the falling frame [m/s]
+   */
+  sumBar(bar: number, k: number, frame: number): Stock
+  /** Force at a position of a span after the latest step k [N]. */
+  readForce(span: number, position: number, k: number): number
+  readExtremes(span: number): SpanExtremes
+  /** Asks for the history of a position; call before the first step. */
+  addProbe(span: number, position: number): void
+  /** The history of a position that was asked for, or of a face. */
+  readTrace(span: number, position: number): SpanTrace
+  /** Both sides of a node that has a law over the run, falling frame; null for other nodes. */
+  readNode(node: number): NodeTrace | null
+}
