@@ -1,3 +1,5 @@
+import { evaluateCosine } from './evaluateCosine'
+import { evaluateSineShare } from './evaluateSineShare'
 import type { TransferMatrix } from './transferMatrix'
 
 /**
@@ -13,9 +15,8 @@ import type { TransferMatrix } from './transferMatrix'
  */
 export function evaluateExponentialMatrix(Z: number, g: number, phase: number): TransferMatrix {
   const square = phase * phase - g * g
-  const K = Math.sqrt(Math.abs(square))
-  const C = square >= 0 ? Math.cos(K) : Math.cosh(K)
-  const S = K < 1e-8 ? 1 : square > 0 ? Math.sin(K) / K : Math.sinh(K) / K
+  const C = evaluateCosine(square)
+  const S = evaluateSineShare(square)
   const growth = Math.exp(g)
   return {
     a: growth * (C - g * S),
