@@ -1,10 +1,8 @@
-import { existsSync } from 'node:fs'
 import { resolve } from 'node:path'
 import vue from '@vitejs/plugin-vue'
 import { defineConfig } from 'electron-vite'
 
 const at = (path: string): string => resolve(import.meta.dirname, path)
-const commandLine = at('src-main/hosts/command-line/commandLine.ts')
 
 export default defineConfig({
   main: {
@@ -17,7 +15,10 @@ export default defineConfig({
         input: {
           desktop: at('src-main/hosts/desktop/desktop.ts'),
           browserHost: at('src-main/hosts/browser/browserHost.ts'),
-          ...(existsSync(commandLine) ? { commandLine } : {}),
+          commandLine: at('src-main/hosts/command-line/commandLine.ts'),
+        },
+        output: {
+          banner: ({ name, isEntry }) => (isEntry && name === 'commandLine' ? '#!/usr/bin/env node' : ''),
         },
       },
     },

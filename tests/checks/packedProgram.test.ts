@@ -82,7 +82,7 @@ describe.skipIf(!canPack)(`the packed program (${howPacked})`, () => {
         env: { PATH: process.env.PATH },
       })
     expect(run('--version').stdout).toContain(SOFTWARE.version)
-    const solved = run('solve', join(packed.find('samples'), 'DEMO.rig.json'))
+    const solved = run('solve', join(packed.find('samples'), 'drop-hammer-shaft/drop-hammer-shaft.rig.json'))
     expect([solved.status, solved.stderr]).toEqual([0, ''])
     expect(solved.stdout.replace(/\s+/g, ' ')).toContain(NOTICE)
   })
