@@ -6,6 +6,7 @@ import { describeDimension, isSameDimension } from './formula/dimension'
 import { nearestName } from './nearestName'
 import type { Place } from './place'
 import type { Reading } from './reading'
+import { didYouMean, listKnown } from './texts/nameHint'
 
 /**
  * Checks that the studies of a rig speak of its variables, in their dimensions.
@@ -57,9 +58,7 @@ function checkVariable(reading: Reading, place: Place, name: string | undefined)
   if (name === undefined || reading.variables.has(name)) return
   const known = [...reading.variables.keys()]
   const nearest = nearestName(name, known)
-  const hint = nearest
-    ? `; did you mean "${nearest}"?`
-    : `; the variables of this rig are ${known.join(', ') || 'none'}`
+  const hint = nearest ? didYouMean(nearest) : listKnown(known)
   reading.faults.add(place, faultText.formulaUnknownName(name, hint))
 }
 

@@ -38,6 +38,8 @@ export const LIMITS = {
   samples: 256,
   /** No SI value of a rig is larger, and no positive one smaller than its inverse. */
   magnitude: 1e18,
+  /** [m]; what is longer is a slip of capitals, such as Mm for mm. */
+  length: 1e6,
   cells: 200_000,
   steps: 5_000_000,
   /** Bytes that a run may hold. */

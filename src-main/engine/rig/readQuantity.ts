@@ -29,13 +29,14 @@ export function readQuantity(
   const formula = readQuantityFormula(reading, place, value, dimension, 'none')
   if (formula === null || formula.fixed === null) return null
   const fixed = formula.fixed
-  if (range === 'positive' ? !(fixed > 0) : range === 'not-negative' && !(fixed >= 0)) {
+  if ((range === 'positive' && fixed <= 0) || (range === 'not-negative' && fixed < 0)) {
     reading.faults.add(place, faultText.outOfRange(value, range))
     return null
   }
   const size = Math.abs(fixed)
-  if (size > LIMITS.magnitude || (range === 'positive' && size < 1 / LIMITS.magnitude)) {
-    reading.faults.add(place, faultText.beyondMagnitude(value))
+  const largest = dimension === 'length' ? LIMITS.length : LIMITS.magnitude
+  if (size > largest || (range === 'positive' && size < 1 / LIMITS.magnitude)) {
+    reading.faults.add(place, faultText.beyondMagnitude(value, largest))
     return null
   }
   return fixed

@@ -11,6 +11,7 @@ import type {
 import { faultText } from '../faultText'
 import { nearestName } from '../nearestName'
 import { quote } from '../showValue'
+import { didYouMean } from '../texts/nameHint'
 import type { Dimension } from './dimension'
 import { describeDimension, DIMENSIONS, isSameDimension, PLAIN } from './dimension'
 import { compileName } from './compileName'
@@ -149,9 +150,7 @@ function compileCall(node: FunctionNode, scope: Scope): Formula {
   const known = typeof name === 'string' ? FORMULA_FUNCTIONS.get(name) : undefined
   if (typeof name !== 'string' || !known) {
     const nearest = nearestName(String(name), FORMULA_FUNCTIONS.keys())
-    return refuse(
-      `the function ${quote(String(name))} has no place in it${nearest ? `; did you mean ${quote(nearest)}?` : ''}`,
-    )
+    return refuse(`the function ${quote(String(name))} has no place in it${didYouMean(nearest)}`)
   }
   const [least, most] = known.count
   if (node.args.length < least || node.args.length > most) {

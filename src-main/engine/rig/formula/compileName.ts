@@ -1,5 +1,6 @@
 import { faultText } from '../faultText'
 import { nearestName } from '../nearestName'
+import { didYouMean } from '../texts/nameHint'
 import { DIMENSIONS, PLAIN } from './dimension'
 import { findUnit } from './findUnit'
 import type { Formula, Scope } from './formula'
@@ -57,9 +58,9 @@ function hintFor(name: string, scope: Scope): string {
   if (FORMULA_FUNCTIONS.has(name)) return ` without parentheses; a function is written ${name}(...)`
   const parts = COMMON_UNITS.flatMap((a) => COMMON_UNITS.map((b) => [a, b])).find(([a, b]) => a + b === name)
   const known = [...scope.variables.keys(), ...CONSTANTS.keys(), ...COMMON_UNITS]
-  if (parts) return `; did you mean "${parts.join(' ')}"?`
+  if (parts) return didYouMean(parts.join(' '))
   const sameLetters = known.find((it) => it.toLowerCase() === name.toLowerCase())
-  if (sameLetters) return `; did you mean "${sameLetters}"? Capitals matter`
+  if (sameLetters) return `${didYouMean(sameLetters)} Capitals matter`
   const nearest = name.length < 3 ? null : nearestName(name, known)
-  return nearest ? `; did you mean "${nearest}"?` : '; it is no unit, no constant and none of the variables'
+  return nearest ? didYouMean(nearest) : '; it is no unit, no constant and none of the variables'
 }

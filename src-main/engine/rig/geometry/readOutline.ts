@@ -81,8 +81,8 @@ function readFormulaOutline(
       reading.faults.add(place, faultText.formulaNotFinite(raw, ` ${where}`))
       return null
     }
-    if (value > LIMITS.magnitude) {
-      reading.faults.add(place, faultText.beyondMagnitude(raw))
+    if (value > LIMITS.length) {
+      reading.faults.add(place, faultText.beyondMagnitude(raw, LIMITS.length))
       return null
     }
     if (want.range === 'positive' ? value <= 0 : value < 0) {

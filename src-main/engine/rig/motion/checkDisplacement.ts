@@ -25,7 +25,7 @@ export function checkDisplacement(
       `it starts at ${showLength(first)} and the end of the bar at ${showLength(initial)}`,
     )
   }
-  if (pulse.shape !== 'table' && pulse.shape !== 'file' && pulse.rise === 0) {
+  if (!['table', 'file', 'formula'].includes(pulse.shape) && pulse.rise === 0) {
     return faultText.displacementJump(`a ${pulse.shape} without rise or fall does`)
   }
   const begin = pulse.breaks[0]

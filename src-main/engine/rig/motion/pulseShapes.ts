@@ -69,7 +69,8 @@ export function makeTrapezoid(
     if (t < start + rise) return (peak * (t - start)) / rise
     return t > end - fall ? (peak * (end - t)) / fall : peak
   }
-  const breaks = [...new Set([start, start + rise, end - fall, end])].sort((a, b) => a - b)
+  const level = shape === 'triangle' ? [start + rise] : [start + rise, end - fall]
+  const breaks = [...new Set([start, ...level, end])].sort((a, b) => a - b)
   return { shape, value, rise: STRAIGHT_RISE * Math.min(rise, fall), breaks }
 }
 

@@ -168,5 +168,11 @@ function readFormulaPulse(
     reading.faults.add(place, faultText.formulaNotFinite(raw, ` at t = ${showNumber(t * 1e6)} us`))
     return null
   }
-  return { shape: 'formula', value: (t) => formula.at(t, 0), rise: null, breaks: [] }
+  const jumps = formula.at(0, 0) !== 0
+  return {
+    shape: 'formula',
+    value: (t) => formula.at(t, 0),
+    rise: jumps ? 0 : null,
+    breaks: jumps ? [0] : [],
+  }
 }
