@@ -1,7 +1,6 @@
 import type { RunRecord } from '../../../../src-main/engine/records/record'
 import type { Line } from '../../../../src-main/engine/line/line'
-import { advanceWaves } from '../../../../src-main/engine/characteristics/advanceWaves'
-import { makeWaveRun } from '../../../../src-main/engine/characteristics/makeWaveRun'
+import { makeWaveMethod } from '../../../../src-main/engine/characteristics/makeWaveMethod'
 import { makeLine } from '../../../../src-main/engine/line/makeLine'
 import { makeMarch } from '../../../../src-main/engine/march/march'
 import { makeRecords } from '../../../../src-main/engine/records/makeRecords'
@@ -15,9 +14,9 @@ export function runPlain(
   const rig = makePlainRig(plain)
   rig.gauges = gauges.map(({ bar, at }, i) => ({ name: `G${i + 1}`, bar, at, bridge: null }))
   const line = makeLine(rig)
-  const run = makeWaveRun(line)
+  const run = makeWaveMethod(line)
   const records = makeRecords(run, false)
-  const march = makeMarch({ advance: (from, to) => advanceWaves(run, from, to) }, records, line.steps)
+  const march = makeMarch(run, records, line.steps)
   march.advance(march.end)
   return { line, record: records.finish() }
 }
