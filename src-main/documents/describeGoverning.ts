@@ -1,4 +1,5 @@
 import type { Result } from '../contract/result'
+import { evaluateSafetyFactor } from './evaluateSafetyFactor'
 import { formatMargin } from './format/formatMargin'
 import { formatQuantity } from './format/formatQuantity'
 import { formatSection } from './format/formatSection'
@@ -35,7 +36,9 @@ export function describeGoverning({ governing, sections }: Result): GoverningWor
   const words = [`${formatSection(bar, section)}, ${sense}`]
   if (peak) {
     words.push(`local stress ${formatQuantity(peak.local, 'stress')}`)
-    words.push(`allowable ${formatQuantity(peak.allowable, 'stress')} before the factor of safety`)
+    words.push(
+      `allowable ${formatQuantity(peak.allowable, 'stress')}, factor of safety ${formatQuantity(evaluateSafetyFactor(sections), 'ratio')}`,
+    )
     words.push(`at ${formatQuantity(peak.at, 'length')}, ${formatQuantity(peak.time, 'time')}`)
   }
   return {
@@ -43,7 +46,7 @@ export function describeGoverning({ governing, sections }: Result): GoverningWor
     negative,
     verdict: negative
       ? 'NEGATIVE MARGIN: the stress is over what the factor of safety allows.'
-      : 'The smallest margin is not negative.',
+      : 'No margin is negative.',
     place: words.join('; '),
   }
 }

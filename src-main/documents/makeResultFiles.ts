@@ -1,5 +1,5 @@
 import type { Result } from '../contract/result'
-import { writeReport } from './report/writeReport'
+import { writeReportParts } from './report/writeReport'
 import { writeEnvelopeCsv } from './writeEnvelopeCsv'
 import { writeGaugesCsv } from './writeGaugesCsv'
 import { writeResultJson } from './writeResultJson'
@@ -32,6 +32,6 @@ export function makeResultFiles(result: Result, rigText: string): ResultFiles {
     'envelope.csv': () => writeEnvelopeCsv(result.envelope),
     'gauges.csv': () => writeGaugesCsv(result.gauges),
     'sections.csv': () => writeSectionsCsv(result.sections),
-    'report.html': () => [writeReport(result, rigText)],
+    'report.html': () => writeReportParts(result, rigText),
   }
 }

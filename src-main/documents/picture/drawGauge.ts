@@ -3,6 +3,11 @@ import { markup, type Markup } from '../markup'
 import type { Frame } from './drawFrame'
 import { round } from './drawPath'
 import { drawTraces } from './drawTraces'
+import { findOverlaps } from './findOverlaps'
+import { mergeStretches } from './mergeStretches'
+
+/** Height of the bars along the edges. */
+const BAR = 4
 
 /**
  * Draws what a gauge has read: the force and the two waves that make it, the passing pulses as bars along
@@ -21,26 +26,39 @@ export function drawGauge(gauge: GaugeTable): Markup {
       { name: 'leftgoing wave (bar along the bottom edge)', values: gauge.leftgoingForce, line: 'dotted' },
       { name: 'force; hatched while opposite waves overlap', values: gauge.force, line: 'solid' },
     ],
-    (frame) => gauge.pulses.map((pulse) => drawPulse(pulse, gauge.pulses, frame)),
+    (frame) => [
+      drawOverlaps(gauge.pulses, frame),
+      drawBars(gauge.pulses, 'right', frame.top, frame),
+      drawBars(gauge.pulses, 'left', frame.top + frame.height - BAR, frame),
+    ],
   )
 }
 
-function drawPulse(pulse: GaugePulse, pulses: GaugePulse[], frame: Frame): Markup {
-  const left = round(frame.x.place(pulse.from))
-  const width = round(frame.x.place(pulse.to) - left)
-  const rightward = pulse.direction === 'right'
-  const top = rightward ? frame.top : frame.top + frame.height - 4
-  const overlaps = rightward ? pulses.filter((other) => other.direction === 'left') : []
-  return markup`${overlaps.map((other) => drawOverlap(pulse, other, frame))}<rect class="pulse" x="${left}" y="${top}" width="${width}" height="4"/>`
+/** Time that one unit of the picture stands for, below which nothing can be told apart. */
+function evaluateUnit({ x, width }: Frame): number {
+  return (x.to - x.from) / width
 }
 
-function drawOverlap(pulse: GaugePulse, other: GaugePulse, { x, top, height }: Frame): Markup {
-  const from = Math.max(pulse.from, other.from)
-  const to = Math.min(pulse.to, other.to)
-  if (from >= to) return markup``
-  const left = round(x.place(from))
-  const right = round(x.place(to))
+function drawBars(
+  pulses: GaugePulse[],
+  direction: GaugePulse['direction'],
+  top: number,
+  frame: Frame,
+): Markup {
+  const own = pulses.filter((pulse) => pulse.direction === direction)
+  return markup`${mergeStretches(own, evaluateUnit(frame)).map(({ from, to }) => {
+    const left = round(frame.x.place(from))
+    return markup`<rect class="pulse" x="${left}" y="${top}" width="${round(frame.x.place(to) - left)}" height="${BAR}"/>`
+  })}`
+}
+
+function drawOverlaps(pulses: GaugePulse[], frame: Frame): Markup {
+  const { x, top, height } = frame
   let hatching = ''
-  for (let place = left; place < right; place += 6) hatching += `M${round(place)} ${top + height}v${-height}`
-  return markup`<path class="overlap" d="${hatching}"/>`
+  for (const { from, to } of mergeStretches(findOverlaps(pulses), evaluateUnit(frame))) {
+    const right = x.place(to)
+    for (let place = x.place(from); place < right; place += 6)
+      hatching += `M${round(place)} ${top + height}v${-height}`
+  }
+  return hatching === '' ? markup`` : markup`<path class="overlap" d="${hatching}"/>`
 }

@@ -5,7 +5,7 @@ import { makeReportStyle } from './reportStyle'
 import { drawHead } from './drawHead'
 import { drawLinePart } from './drawLinePart'
 import { drawProofPart } from './drawProofPart'
-import { drawRunPart } from './drawRunPart'
+import { drawRunParts } from './drawRunParts'
 import { drawStressPart } from './drawStressPart'
 
 /**
@@ -16,9 +16,20 @@ import { drawStressPart } from './drawStressPart'
  * @returns the text of `report.html`
  */
 export function writeReport(result: Result, rigText?: string): string {
+  return [...writeReportParts(result, rigText)].join('')
+}
+
+/**
+ * Writes the report part by part, so that a run can be stopped between them.
+ *
+ * @param result - SI; every text in it is escaped
+ * @param rigText - the rig file as it was read, set at the end; left out where it is not at hand
+ * @returns the text of `report.html` in parts
+ */
+export function* writeReportParts(result: Result, rigText?: string): Generator<string> {
   const style = makeReportStyle()
   const policy = `default-src 'none'; style-src 'sha256-${hash(style)}'; base-uri 'none'; form-action 'none'`
-  return markup`<!doctype html>
+  yield markup`<!doctype html>
 <html lang="en">
 <head>
 <meta charset="utf-8">
@@ -30,11 +41,13 @@ export function writeReport(result: Result, rigText?: string): string {
 </head>
 <body>
 <main>
-${drawHead(result)}
-${drawStressPart(result)}
-${drawLinePart(result)}
-${drawRunPart(result)}
-${drawProofPart(result, rigText)}
+`.text
+  yield drawHead(result).text
+  yield drawStressPart(result).text
+  yield drawLinePart(result).text
+  for (const part of drawRunParts(result)) yield part.text
+  yield drawProofPart(result, rigText).text
+  yield markup`
 </main>
 <footer><p class="notice">${result.notice}</p></footer>
 </body>

@@ -2,8 +2,10 @@ import { describe, expect, test } from 'vitest'
 import { coarsenField } from '../../../src-main/documents/picture/coarsenField'
 import { makeColourMap, SHADES } from '../../../src-main/documents/picture/colourMap'
 import { drawPath } from '../../../src-main/documents/picture/drawPath'
+import { findOverlaps } from '../../../src-main/documents/picture/findOverlaps'
 import { findRange } from '../../../src-main/documents/picture/findRange'
 import { listTicks } from '../../../src-main/documents/picture/listTicks'
+import { mergeStretches } from '../../../src-main/documents/picture/mergeStretches'
 import { makeScale } from '../../../src-main/documents/picture/scale'
 import { thinByExtremes } from '../../../src-main/documents/picture/thinByExtremes'
 
@@ -100,4 +102,40 @@ test.each(['light', 'dark'] as const)('the %s colour map runs through its stops'
   expect(map).toHaveLength(SHADES)
   expect([0, 5, 10, 15, 20].map((i) => map[i])).toEqual(stops)
   expect(new Set(map).size).toBe(SHADES)
+})
+
+test('opposite waves overlap where both pass, and touching ends are none', () => {
+  const pulse = (direction: 'right' | 'left', from: number, to: number) => ({
+    direction,
+    from,
+    to,
+    peakForce: 1,
+    clear: false,
+  })
+  const pulses = [
+    pulse('right', 0, 4),
+    pulse('left', 1, 2),
+    pulse('left', 3, 6),
+    pulse('right', 5, 8),
+    pulse('left', 8, 9),
+  ]
+  expect(findOverlaps(pulses)).toEqual([
+    { from: 1, to: 2 },
+    { from: 3, to: 4 },
+    { from: 5, to: 6 },
+  ])
+  expect(findOverlaps(pulses.filter(({ direction }) => direction === 'left'))).toEqual([])
+})
+
+test('stretches that cannot be told apart become one', () => {
+  const stretches = [
+    { from: 0, to: 1 },
+    { from: 1.5, to: 2 },
+    { from: 4, to: 5 },
+  ]
+  expect(mergeStretches(stretches, 1)).toEqual([
+    { from: 0, to: 2 },
+    { from: 4, to: 5 },
+  ])
+  expect(mergeStretches(stretches, 0.1)).toEqual(stretches)
 })
