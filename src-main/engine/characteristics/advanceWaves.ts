@@ -54,6 +54,7 @@ function advancePair(run: WaveRun, graded: readonly LiveBlock[], k: number): voi
       gradedKernel.stepPair(slot, slot + cells - 1, k, left.leaving[k], right.leaving[k])
       left.arriving[k + 1] = gradedKernel.pairToLeft
       right.arriving[k + 1] = gradedKernel.pairToRight
+      probeLeaving(block, k + 1)
     }
   }
   closeNodes(run, k + 1, k + 2)
@@ -83,6 +84,22 @@ function arrive(block: LiveBlock, k: number): void {
     velocity[k] = Y * (gIn - fIn)
   }
   if (k % FLUSH_EVERY < 2) gradedKernel.flush(slot, slot + cells - 1)
+}
+
+/**
+ * Notes what a block's probes see at step k once the step is made, from the waves a and b that left the
+ * node to the right and to the left: `F = 2 (Z1 a + Z2 b)/(Z1 + Z2)`, `v = 2 (b - a)/(Z1 + Z2)`.
+ */
+function probeLeaving(block: LiveBlock, k: number): void {
+  const { slot, probes, impedance } = block
+  for (let i = 0; i < probes.length; i++) {
+    const { position, force, velocity } = probes[i]
+    const Y = 2 / (impedance[position - 1] + impedance[position])
+    const a = gradedKernel.f[slot + position]
+    const b = gradedKernel.g[slot + position - 1]
+    force[k] = Y * (impedance[position - 1] * a + impedance[position] * b)
+    velocity[k] = Y * (b - a)
+  }
 }
 
 /** Puts the waves that its nodes sent at step k into a block, once its inside has made that step. */
