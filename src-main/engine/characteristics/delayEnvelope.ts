@@ -1,7 +1,7 @@
 import type { DelayLine } from './delayLine'
 import { makeTileBounds } from './tileBounds'
 import { type Extremes, TILE, tileKernel } from './tileKernel'
-import { WIDENING } from './widening'
+import { WIDENING } from '../march/widening'
 
 /** Rows of tiles taken together: enough that most tiles meet the peak of their place before it is passed. */
 const WINDOW = 256

@@ -1,12 +1,6 @@
 import { MOST_CELLS } from '../line/limits'
-import { WIDENING } from './widening'
-
-/** A run's own copy of the kernel's arrays while another run holds them. */
-export interface GradedState {
-  /** Slots in use: cells and one more per block, summed over the run's graded blocks. */
-  size: number
-  saved: (Float64Array | Int32Array)[]
-}
+import { makeHolder } from '../march/makeHolder'
+import { WIDENING } from '../march/widening'
 
 /**
  * The kernel that marches graded blocks, with its work arrays. It is made once: V8 compiles the
@@ -26,8 +20,6 @@ function makeGradedKernel() {
   const low = new Float64Array(SIZE)
   const highStep = new Int32Array(SIZE)
   const lowStep = new Int32Array(SIZE)
-  const arrays = [f, g, T, high, low, highStep, lowStep]
-  let holder: GradedState | null = null
   let toLeft = 0
   let toRight = 0
 
@@ -52,18 +44,7 @@ function makeGradedKernel() {
     widen,
 
     /** Brings a run's arrays into the kernel, saving those of the run that held it. */
-    enter(state: GradedState): void {
-      if (holder === state) return
-      if (state.size > SIZE) throw new Error(`a line of ${state.size} graded cells is over the kernel's ${SIZE}`)
-      const last = holder
-      if (last !== null) last.saved = arrays.map((array) => array.slice(0, last.size))
-      arrays.forEach((array, i) => {
-        array.fill(0, 0, state.size)
-        if (state.saved.length > 0) array.set(state.saved[i])
-      })
-      state.saved = []
-      holder = state
-    },
+    enter: makeHolder([f, g, T, high, low, highStep, lowStep]),
 
     /**
      * Scatters at every inner node of a block and shifts by one cell, in place, with the force

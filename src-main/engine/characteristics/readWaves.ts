@@ -1,5 +1,5 @@
 import { gradedKernel } from './gradedKernel'
-import { WIDENING } from './widening'
+import { WIDENING } from '../march/widening'
 import type { SpanExtremes, SpanTrace, Stock } from '../march/methodRun'
 import type { LiveBlock, WaveRun } from './waveRun'
 

@@ -5,7 +5,7 @@ import type { Beat, Body, NodeLaw } from '../laws/side'
 import type { Block } from './block'
 import type { DelayEnvelope } from './delayEnvelope'
 import type { DelayLine } from './delayLine'
-import type { GradedState } from './gradedKernel'
+import type { HeldState } from '../march/makeHolder'
 
 /** The history of one inner position of a graded block, shape (steps + 1) each. */
 export interface Probe {
@@ -69,6 +69,6 @@ export interface WaveRun {
   /** Rigid bodies at the ends. */
   bodies: Body[]
   outside: { left: Outside; right: Outside; loads: Outside[] }
-  graded: GradedState
+  graded: HeldState
   beat: Beat
 }

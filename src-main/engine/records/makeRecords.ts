@@ -37,6 +37,7 @@ export function makeRecords(run: MethodRun, full: boolean): Records {
       return ledger.record(index)
     },
     finish() {
+      if (rows.length < steps.length) throw new Error('the run is not at its end')
       return {
         envelope: makeForceEnvelope(run),
         node: (index) => traceNode(run, index),
