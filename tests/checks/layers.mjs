@@ -5,7 +5,17 @@
  * layer to the last; imports run the other way.
  */
 const engine = (...names) => names.map((name) => `engine/${name}`)
-const rooms = engine('rig', 'line', 'laws', 'characteristics', 'march', 'records', 'answers', 'exact')
+const rooms = engine(
+  'rig',
+  'line',
+  'laws',
+  'march',
+  'characteristics',
+  'elements',
+  'records',
+  'answers',
+  'exact',
+)
 
 export const layers = [
   { name: 'contract', folder: 'src-main/contract', what: 'types and texts that cross a boundary', may: [] },
@@ -13,19 +23,24 @@ export const layers = [
   { name: 'engine/line', what: 'rig to cells: impedance, travel time, grid', may: ['contract'] },
   { name: 'engine/laws', what: 'what closes the equations at a point', may: ['contract', ...engine('line')] },
   {
-    name: 'engine/characteristics',
-    what: 'the method: one step per file',
+    name: 'engine/march',
+    what: 'the time loop, and what a method shows of itself',
     may: ['contract', ...engine('line', 'laws')],
   },
   {
-    name: 'engine/march',
-    what: 'the time loop',
-    may: ['contract', ...engine('line')],
+    name: 'engine/characteristics',
+    what: 'the first method: waves along delay lines',
+    may: ['contract', ...engine('line', 'laws', 'march')],
+  },
+  {
+    name: 'engine/elements',
+    what: 'the second method: central difference',
+    may: ['contract', ...engine('line', 'laws', 'march')],
   },
   {
     name: 'engine/records',
     what: 'envelope, gauges, field, ledgers',
-    may: ['contract', ...engine('line', 'laws', 'characteristics', 'march')],
+    may: ['contract', ...engine('line', 'laws', 'march')],
   },
   {
     name: 'engine/answers',
