@@ -154,9 +154,8 @@ function compileCall(node: FunctionNode, scope: Scope): Formula {
   }
   const [least, most] = known.count
   if (node.args.length < least || node.args.length > most) {
-    return refuse(
-      `${name}(...) takes ${least === most ? least : `${least} to ${most}`} values, got ${node.args.length}`,
-    )
+    const count = least === most ? String(least) : `${least} to ${most}`
+    return refuse(`${name}(...) takes ${count} value${most === 1 ? '' : 's'}, got ${node.args.length}`)
   }
   if (known.rule === 'power') return compilePower(node.args, scope, false)
   const parts = node.args.map((arg) => compileFormula(arg, scope))

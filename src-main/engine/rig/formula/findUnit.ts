@@ -45,7 +45,7 @@ export function findUnit(name: string): UnitFactor | string | null {
 function lookUp(name: string): UnitFactor | string | null {
   if (Object.hasOwn(REFUSED, name)) return REFUSED[name]
   const { Unit } = getParser()
-  if (!/^[A-Za-z]+$/.test(name) || !Unit.isValuelessUnit(name)) return null
+  if (!/^[A-Za-z]+[23]?$/.test(name) || !Unit.isValuelessUnit(name)) return null
   const unit = new Unit(1, name)
   if (unit.dimensions[4] !== 0) return 'temperatures have no place in a rig'
   return TRADE.has(unit.units[0].unit.name) ? { factor: unit.value, dimension: [...unit.dimensions] } : null

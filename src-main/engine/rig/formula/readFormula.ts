@@ -9,6 +9,7 @@ import type { Formula, Scope } from './formula'
 import { makeFixedFormula } from './formula'
 import { FormulaRefusal } from './formulaRefusal'
 import { getParser } from './parser'
+import { scaleByUnit } from './scaleByUnit'
 
 /** A formula, or why there is none; no reason where a variable in it has its own fault. */
 export type FormulaReading = { formula: Formula } | { formula: null; text: FaultText | null }
@@ -54,7 +55,7 @@ function readSimple(text: string, scope: Scope): Formula | null {
     return null
   const unit = findUnit(name)
   if (unit === null || typeof unit === 'string') return null
-  return makeFixedFormula(number * unit.factor, unit.dimension)
+  return makeFixedFormula(scaleByUnit(number, unit.factor), unit.dimension)
 }
 
 function readAny(text: string, scope: Scope): Formula {

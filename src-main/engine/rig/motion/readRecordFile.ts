@@ -1,6 +1,7 @@
 import { faultText } from '../faultText'
 import type { Loose } from '../form/loose'
 import type { DimensionName } from '../formula/dimension'
+import { scaleByUnit } from '../formula/scaleByUnit'
 import type { Place } from '../place'
 import { readQuantity, readQuantityFormula } from '../readQuantity'
 import type { Reading } from '../reading'
@@ -91,7 +92,7 @@ function readColumn(
   }
   const index = number === undefined ? named[0] : number - 1
   const factor = readUnit(reading, [...at, 'unit'], unit, record.headings[index] ?? '', dimension, refuse)
-  return factor === null ? null : record.columns[index].map((value) => value * factor)
+  return factor === null ? null : record.columns[index].map((value) => scaleByUnit(value, factor))
 }
 
 /** Takes the unit that is given, else the one in the brackets of the heading. */
