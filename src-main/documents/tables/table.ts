@@ -20,6 +20,9 @@ export interface Column<Row> {
   value(row: Row): string | number | null
 }
 
+/** Share of a column's largest number under which another one is rounding and reads 0. */
+const ROUNDING = 1e-12
+
 /**
  * Lays out a table: each column gets one unit, which its heading names.
  *
@@ -47,12 +50,14 @@ function layColumn<Row>({ heading, measures, value }: Column<Row>, rows: Row[]) 
   if (measures === 'text') return { heading, cells: values.map((text) => String(text ?? 'none')) }
   if (measures === 'margin')
     return { heading, cells: values.map((margin) => formatMargin(margin as number | null)) }
-  const unit = chooseUnit(
-    measures,
-    values.filter((number) => typeof number === 'number'),
-  )
+  const numbers = values.filter((number) => typeof number === 'number')
+  const unit = chooseUnit(measures, numbers)
+  const nothing = ROUNDING * numbers.reduce((most, number) => Math.max(most, Math.abs(number)), 0)
   return {
     heading: unit.name === '' ? heading : `${heading} [${unit.name}]`,
-    cells: values.map((number) => (typeof number === 'number' ? formatNumber(number / unit.size) : 'none')),
+    cells: values.map((number) => {
+      if (typeof number !== 'number') return 'none'
+      return formatNumber(Math.abs(number) < nothing ? 0 : number / unit.size)
+    }),
   }
 }
