@@ -58,6 +58,17 @@ export function describeCushionedRam(): void {
       expectShown(readme, energy, 'J')
     })
 
+    it('feels nothing of the pad across an open gap', () => {
+      const gap = 0.6e-3
+      const withGap = solveSample('cushioned-ram', (text) =>
+        text.replace('"damping": "3 kN s/m"', '"damping": "3 kN s/m", "gap": "0.6 mm"'),
+      )
+      const { timeStep } = withGap.solution.run
+      expect(Math.abs(withGap.solution.joints[0].closedFrom! - gap / speed)).toBeLessThan(2 * timeStep)
+      // The pad presses as before, only later: the force of one step is what the closing inside a step costs.
+      expectClose(withGap.solution.joints[0].peakForce, -evaluateForce(duration), 5e-3)
+    })
+
     it('keeps its margin in proportion to the speed', () => {
       const { margin } = solution.governing!
       expectClose(solution.striker!.safeSpeed!, speed * (1 + margin))
