@@ -62,6 +62,7 @@ describe('the samples', () => {
       expect(solution.momentum.closure).toBeLessThan(1e-12)
       expect(solution.cautions.filter(({ code }) => BAD_SETUP.includes(code))).toEqual([])
       expect(solution.governing!.margin).toBeGreaterThan(0)
+    expect(readReadme(name)).toContain(`+${solution.governing!.margin.toFixed(3)}`)
       for (const { material } of rig.bars.flatMap(({ sections }) => sections)) {
         expect(material.source).toMatch(/from memory|table|typical values|data sheet/)
       }
