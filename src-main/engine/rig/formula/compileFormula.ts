@@ -14,9 +14,11 @@ import { quote } from '../showValue'
 import { didYouMean } from '../texts/nameHint'
 import type { Dimension } from './dimension'
 import { describeDimension, DIMENSIONS, isSameDimension, PLAIN } from './dimension'
+import { checkDivision } from './checkDivision'
 import { compileName } from './compileName'
 import type { Formula, Scope } from './formula'
-import { makeFixedFormula } from './formula'
+import { findUnit } from './findUnit'
+import { CONSTANTS, makeFixedFormula } from './formula'
 import type { FormulaFunction } from './formulaFunctions'
 import { FORMULA_FUNCTIONS } from './formulaFunctions'
 import { FormulaRefusal } from './formulaRefusal'
@@ -103,6 +105,7 @@ function compileOperator(node: OperatorNode<never, never>, scope: Scope, divides
   const args = node.args as MathNode[]
   if (fn === 'pow') return compilePower(args, scope, divides)
   if (fn === 'multiply' || fn === 'divide') {
+    checkDivision(node, scope)
     const left = compileFormula(args[0], scope, divides)
     const right = compileFormula(args[1], scope, fn === 'divide' ? !divides : divides)
     const sign = fn === 'divide' ? -1 : 1
@@ -149,8 +152,12 @@ function compileCall(node: FunctionNode, scope: Scope): Formula {
   const name = (node.fn as { name?: unknown }).name
   const known = typeof name === 'string' ? FORMULA_FUNCTIONS.get(name) : undefined
   if (typeof name !== 'string' || !known) {
-    const nearest = nearestName(String(name), FORMULA_FUNCTIONS.keys())
-    return refuse(`the function ${quote(String(name))} has no place in it${didYouMean(nearest)}`)
+    const shown = String(name)
+    if (scope.variables.has(shown) || CONSTANTS.has(shown) || findUnit(shown) !== null) {
+      return refuse(`${quote(shown)} is no function; to multiply, write ${shown} * (...)`)
+    }
+    const nearest = nearestName(shown, FORMULA_FUNCTIONS.keys())
+    return refuse(`the function ${quote(shown)} has no place in it${didYouMean(nearest)}`)
   }
   const [least, most] = known.count
   if (node.args.length < least || node.args.length > most) {
