@@ -1,4 +1,4 @@
-/** Every way in which an input can be refused. The words for each stand in one table, `describeFault`. */
+/** Every way in which an input can be refused. The words for each stand in one table, `engine/rig/faultText`. */
 export type FaultCode =
   | 'not-readable'
   | 'too-large'

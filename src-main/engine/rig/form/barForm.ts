@@ -28,6 +28,7 @@ function outline(what: string) {
     .optional()
 }
 
+/** A section; which of its keys go together is checked by `readSection`. */
 export const sectionForm = strictForm(
   {
     name: words('For people only').optional(),
@@ -54,6 +55,7 @@ export const sectionForm = strictForm(
   'section',
 )
 
+/** A bar with its sections and its state at the start. */
 export const barForm = strictForm(
   {
     name: words('Name of the bar, each its own'),

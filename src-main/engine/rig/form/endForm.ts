@@ -8,6 +8,7 @@ const joint = z.enum(['bonded', 'contact']).optional().meta({
 })
 const gap = quantity('length', 'Distance at the start; none where left out').optional()
 
+/** An end of the line, by its kind. */
 export const endForm = z
   .discriminatedUnion('kind', [
     strictForm({ kind: z.literal('free') }, 'No force'),

@@ -50,6 +50,7 @@ const lawForm = z
   ])
   .meta({ description: 'How the stress of the specimen follows from its strain' })
 
+/** What connects a bar to the next, by its kind. */
 export const jointForm = z
   .discriminatedUnion('kind', [
     strictForm({ kind: z.literal('bonded') }, 'Carries tension and compression'),

@@ -101,8 +101,11 @@ function pulseForm(dimension: Exclude<DimensionName, 'number'>, id: string) {
     .meta({ id, description: 'A prescribed history' })
 }
 
+/** A history of a force. */
 export const forcePulseForm = pulseForm('force', 'forcePulse')
+/** A history of a velocity. */
 export const velocityPulseForm = pulseForm('velocity', 'velocityPulse')
+/** A history of a displacement, which must not jump. */
 export const displacementPulseForm = pulseForm('length', 'displacementPulse')
 
 /** A prescribed history, whatever its values are. */

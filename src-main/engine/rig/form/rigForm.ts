@@ -10,6 +10,7 @@ import { studyForm } from './studyForm'
 /** The word that a rig file of this version begins with. */
 export const RIG_FORMAT = 'barwright-rig/1'
 
+/** A strain gauge station. */
 export const gaugeForm = strictForm(
   {
     name: words('Name of the gauge, each its own'),

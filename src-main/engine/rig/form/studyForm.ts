@@ -11,6 +11,7 @@ const range = {
   count: z.int().min(2).max(1000).meta({ description: 'How many values' }),
 }
 
+/** A study of the rig, by its kind; `checkStudies` checks its variables. */
 export const studyForm = z
   .discriminatedUnion('kind', [
     strictForm(
