@@ -13,6 +13,9 @@ type AllowableForm = Loose<z.infer<typeof allowableForm>>
 /** Wave speeds outside [m/s] belong to no solid; a unit is wrong. */
 const SLOWEST = 1
 const FASTEST = 1e5
+/** Fatigue exponents outside belong to no material: metals lie near -0.05 to -0.15, welds near -0.2 to -0.33: common practice. */
+const STEEPEST = -1
+const FLATTEST = -0.01
 
 /**
  * Reads the materials of a rig.
@@ -86,7 +89,10 @@ function readFatigue(reading: Reading, place: Place, form: MaterialForm['fatigue
   if (!form) return null
   const strength = readQuantity(reading, [...place, 'strength'], form.strength, 'stress', 'positive')
   const exponent = readQuantity(reading, [...place, 'exponent'], form.exponent, 'number')
-  if (exponent === 0) reading.faults.add([...place, 'exponent'], faultText.outside('0', 'other than zero'))
+  if (exponent !== null && !(exponent >= STEEPEST && exponent <= FLATTEST)) {
+    reading.faults.add([...place, 'exponent'], faultText.fatigueExponent(form.exponent, STEEPEST, FLATTEST))
+    return null
+  }
   return strength === null || exponent === null ? null : { strength, exponent }
 }
 

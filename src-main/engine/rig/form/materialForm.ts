@@ -26,10 +26,10 @@ export const materialForm = strictForm(
     spall: quantity('stress', 'Tensile stress at which the material comes apart').optional(),
     fatigue: strictForm(
       {
-        strength: quantity('stress', 'Fatigue strength coefficient'),
-        exponent: plainNumber('Fatigue strength exponent, such as -0.09'),
+        strength: quantity('stress', 'Fatigue strength coefficient, the amplitude at 2 N = 1'),
+        exponent: plainNumber('Fatigue strength exponent, negative, from -1 to -0.01, such as -0.09'),
       },
-      'Stress amplitude = strength (2 N)^exponent after N cycles',
+      'Fatigue line (Basquin) for fully reversed stress: stress amplitude = strength (2 N)^exponent breaks in N cycles',
     ).optional(),
     source: words('Where the numbers come from').optional(),
   },

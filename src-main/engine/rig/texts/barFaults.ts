@@ -1,4 +1,4 @@
-import { quote, showLength, showNumber } from '../showValue'
+import { quote, showLength, showNumber, showValue } from '../showValue'
 import type { FaultText } from './faultShape'
 import { didYouMean, listKnown } from './nameHint'
 
@@ -19,6 +19,10 @@ export const barFaults = {
   hardeningOverModulus: (): FaultText => ({
     code: 'out-of-range',
     message: 'the tangent modulus after yield must be less than the modulus',
+  }),
+  fatigueExponent: (value: unknown, steepest: number, flattest: number): FaultText => ({
+    code: 'out-of-range',
+    message: `got ${showValue(value)}; it must lie between ${steepest} and ${flattest}, for most metals near -0.05 to -0.15: it is the negative b of amplitude = strength (2 N)^b, so for a line given as N = C / amplitude^m write "-1/m"`,
   }),
 
   severalForms: (given: readonly string[]): FaultText => ({
