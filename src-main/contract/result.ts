@@ -139,6 +139,43 @@ export interface Governing {
   margin: number
 }
 
+/** Cycles of one range in the local stress history of one impact, repeated. */
+export interface FatigueCycle {
+  /** Distance between the two turning points [Pa] */
+  range: number
+  /** Middle of the two [Pa]; shown, not counted */
+  mean: number
+  /** How often it occurs in one impact. */
+  count: number
+  /** Share of the life that these cycles use up in one impact [1]. */
+  damage: number
+}
+
+/** What one impact, repeated, uses up of the fatigue life of a bar, at its most damaged place looked at. */
+export interface FatigueAnswer {
+  bar: string
+  section: number
+  /** [m] along the line */
+  at: number
+  /** Factor of the shoulder at the place; null where there is none or the fit does not reach. */
+  kt: number | null
+  /** The material's fatigue line: amplitude = strength (2 N)^exponent, strength [Pa]. */
+  strength: number
+  exponent: number
+  /** Half the largest local range [Pa]. */
+  amplitude: number
+  /** Cycles in one impact, of whatever range. */
+  cycles: number
+  /** The largest ranges first, at most ten rows. */
+  largest: FatigueCycle[]
+  /** Share of the life that one impact uses up, over all cycles [1]. */
+  damage: number
+  /** The same for the first half of the run alone. */
+  damageFirstHalf: number
+  /** Equal impacts to failure, 1 / damage; under 1 the first one breaks it; null where no cycle does damage. */
+  impacts: number | null
+}
+
 export interface StrikerAnswer {
   name: string
   /** [m/s], positive to the right */
@@ -263,6 +300,8 @@ export type CautionCode =
   | 'negative-margin'
   | 'energy-closure'
   | 'short-run'
+  | 'fatigue-basis'
+  | 'fatigue-range'
 
 export interface Caution {
   code: CautionCode
@@ -270,4 +309,3 @@ export interface Caution {
   /** The place, such as `shaft, section 2`; empty for the whole run. */
   where: string
 }
-
