@@ -1,6 +1,7 @@
+import { breakStretches } from './breakStretches'
 import { flushDelayLine } from './delayLine'
 import { gradedKernel } from './gradedKernel'
-import type { LiveBlock, WaveRun } from './waveRun'
+import type { LiveBlock, Stretch, WaveRun } from './waveRun'
 
 /** Steps between two sweeps for subnormal numbers in graded blocks. */
 const FLUSH_EVERY = 64
@@ -10,19 +11,20 @@ const FLUSH_EVERY = 64
  *
  * A wave cannot cross a delay line in fewer steps than it has cells, so without graded blocks each
  * node takes as many steps in one go as the shortest line has cells. With graded blocks the nodes
- * go step by step and the insides of the blocks in pairs of steps.
+ * go step by step and the insides of the blocks in pairs of steps, or step by step where bars may
+ * come apart.
  */
 export function advanceWaves(run: WaveRun, from: number, to: number): void {
   gradedKernel.enter(run.graded)
-  const graded = run.blocks.filter((block) => block.delay === null)
   const delays = run.blocks.filter((block) => block.delay !== null)
-  if (graded.length === 0) {
+  if (run.stretches.length === 0) {
     const stride = Math.min(...delays.map((block) => block.cells))
     for (let k = from; k < to; k += stride) closeNodes(run, k, Math.min(to, k + stride))
   } else {
+    const graded = run.blocks.filter((block) => block.delay === null)
     let k = from
-    for (; k + 2 <= to; k += 2) advancePair(run, graded, k)
-    if (k < to) advanceOne(run, graded, k)
+    if (!run.line.rig.run.spall) for (; k + 2 <= to; k += 2) advancePair(run, graded, k)
+    for (; k < to; k++) advanceOne(run, graded, k)
   }
   for (const block of delays) {
     flushDelayLine(block.delay!.line, from, to)
@@ -36,51 +38,52 @@ function closeNodes(run: WaveRun, from: number, to: number): void {
 }
 
 function advanceOne(run: WaveRun, graded: readonly LiveBlock[], k: number): void {
-  for (const block of graded) arrive(block, k)
+  for (const block of graded) beginStep(block, k)
+  if (run.line.rig.run.spall) breakStretches(run, k)
+  for (const stretch of run.stretches) arrive(stretch, k)
   closeNodes(run, k, k + 1)
-  for (const block of graded) stepOne(block, k)
+  for (const stretch of run.stretches) stepOne(stretch, k)
 }
 
-/** Two steps: blocks of one cell, which have no inside, take them one by one. */
+/** Two steps: stretches of one cell, which have no inside, take them one by one. */
 function advancePair(run: WaveRun, graded: readonly LiveBlock[], k: number): void {
-  for (const block of graded) arrive(block, k)
+  for (const block of graded) beginStep(block, k)
+  for (const stretch of run.stretches) arrive(stretch, k)
   closeNodes(run, k, k + 1)
-  for (const block of graded) {
-    const { slot, cells, left, right } = block
+  for (const stretch of run.stretches) {
+    const { slot, cells, left, right } = stretch
     if (cells === 1) {
-      stepOne(block, k)
-      arrive(block, k + 1)
+      stepOne(stretch, k)
+      arrive(stretch, k + 1)
     } else {
       gradedKernel.stepPair(slot, slot + cells - 1, k, left.leaving[k], right.leaving[k])
       left.arriving[k + 1] = gradedKernel.pairToLeft
       right.arriving[k + 1] = gradedKernel.pairToRight
-      probeLeaving(block, k + 1)
     }
   }
+  for (const block of graded) probeLeaving(block, k + 1)
   closeNodes(run, k + 1, k + 2)
-  for (const block of graded) {
-    if (block.cells > 1) widenFaces(block, k)
-    receive(block, k + 1)
+  for (const stretch of run.stretches) {
+    if (stretch.cells > 1) widenFaces(stretch, k)
+    receive(stretch, k + 1)
   }
 }
 
-function stepOne(block: LiveBlock, k: number): void {
-  gradedKernel.step(block.slot, block.slot + block.cells - 1, k)
-  receive(block, k)
+function stepOne(stretch: Stretch, k: number): void {
+  gradedKernel.step(stretch.slot, stretch.slot + stretch.cells - 1, k)
+  receive(stretch, k)
 }
 
-/** Notes what arrives at a block's faces at step k, and what its probes see, before the step is made. */
-function arrive(block: LiveBlock, k: number): void {
-  const { slot, cells, left, right, probes } = block
+/** Notes what a block's probes see at step k before it is made, and sweeps its tiny waves out. */
+function beginStep(block: LiveBlock, k: number): void {
+  const { slot, cells, probes, impedance } = block
   const { f, g } = gradedKernel
-  left.arriving[k] = g[slot]
-  right.arriving[k] = f[slot + cells - 1]
   for (let i = 0; i < probes.length; i++) {
     const { position, force, velocity } = probes[i]
-    const Y = 2 / (block.impedance[position - 1] + block.impedance[position])
+    const Y = 2 / (impedance[position - 1] + impedance[position])
     const fIn = f[slot + position - 1]
     const gIn = g[slot + position]
-    force[k] = 2 * gIn + block.impedance[position] * Y * (fIn - gIn)
+    force[k] = 2 * gIn + impedance[position] * Y * (fIn - gIn)
     velocity[k] = Y * (gIn - fIn)
   }
   if (k % FLUSH_EVERY < 2) gradedKernel.flush(slot, slot + cells - 1)
@@ -102,16 +105,23 @@ function probeLeaving(block: LiveBlock, k: number): void {
   }
 }
 
-/** Puts the waves that its nodes sent at step k into a block, once its inside has made that step. */
-function receive(block: LiveBlock, k: number): void {
-  const { slot, cells, left, right } = block
-  gradedKernel.f[slot] = left.leaving[k]
-  gradedKernel.g[slot + cells - 1] = right.leaving[k]
-  widenFaces(block, k)
+/** Notes what arrives at a stretch's faces at step k, before its inside makes the step. */
+function arrive(stretch: Stretch, k: number): void {
+  const { slot, cells, left, right } = stretch
+  left.arriving[k] = gradedKernel.g[slot]
+  right.arriving[k] = gradedKernel.f[slot + cells - 1]
 }
 
-function widenFaces(block: LiveBlock, k: number): void {
-  const { slot, cells, left, right } = block
+/** Puts the waves that its nodes sent at step k into a stretch, once its inside has made that step. */
+function receive(stretch: Stretch, k: number): void {
+  const { slot, cells, left, right } = stretch
+  gradedKernel.f[slot] = left.leaving[k]
+  gradedKernel.g[slot + cells - 1] = right.leaving[k]
+  widenFaces(stretch, k)
+}
+
+function widenFaces(stretch: Stretch, k: number): void {
+  const { slot, cells, left, right } = stretch
   gradedKernel.widen(slot, left.arriving[k] + left.leaving[k], k)
   gradedKernel.widen(slot + cells, right.arriving[k] + right.leaving[k], k)
 }

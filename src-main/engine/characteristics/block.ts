@@ -28,10 +28,15 @@ const SHORTEST_DELAY = 8
  *
  * @param spans the line's spans
  * @param isPlain true where node i (left of span i) is a bonded step without load inside a bar
+ * @param spalls true where a span may come apart at any of its positions
  */
-export function makeBlocks(spans: readonly Span[], isPlain: (node: number) => boolean): Block[] {
+export function makeBlocks(
+  spans: readonly Span[],
+  isPlain: (node: number) => boolean,
+  spalls: (span: Span) => boolean,
+): Block[] {
   const blocks: Block[] = []
-  const isDelay = (span: Span) => span.uniform && span.cells >= SHORTEST_DELAY
+  const isDelay = (span: Span) => span.uniform && span.cells >= SHORTEST_DELAY && !spalls(span)
   for (let first = 0; first < spans.length;) {
     let last = first
     if (!isDelay(spans[first])) {

@@ -1,8 +1,8 @@
 import type { Line } from '../line/line'
-import type { MethodRun, NodeTrace, SpanExtremes, Stock } from '../march/methodRun'
+import type { Fragment, MethodRun, NodeTrace, SpanExtremes, Stock } from '../march/methodRun'
 import { advanceWaves } from './advanceWaves'
 import { makeWaveRun } from './makeWaveRun'
-import { readExtremes, readForce, readTrace, sumBlock } from './readWaves'
+import { readExtremes, readForce, readTrace, sumBlock, sumCells } from './readWaves'
 import type { WaveRun } from './waveRun'
 
 /**
@@ -19,14 +19,19 @@ export function makeWaveMethod(line: Line): MethodRun {
   return {
     line,
     beat: run.beat,
-    laws: new Map(run.nodes.map((node) => [node.index, node.law])),
+    get laws() {
+      return new Map(run.nodes.map((node) => [node.index, node.law]))
+    },
+    breaks: run.breaks,
+    listFragments: () => listFragments(run),
     bodies: run.bodies,
     outside: run.outside,
     advance: (from, to) => advanceWaves(run, from, to),
     sumBar: (bar, k, frame) => sumBar(run, bar, k, frame),
     readForce(span, position, k) {
       const { block, at } = seat(span, position)
-      return readForce(block, at, k)
+      const opened = at > 0 && run.stretches.find((one) => one.block === block && one.start === at)
+      return opened ? opened.left.arriving[k] + opened.left.leaving[k] : readForce(block, at, k)
     },
     readExtremes: (span) => cutExtremes(run, span),
     addProbe(span, position) {
@@ -68,6 +73,20 @@ function cutExtremes(run: WaveRun, span: number): SpanExtremes {
     highStep: highStep.subarray(from, to),
     lowStep: lowStep.subarray(from, to),
   }
+}
+
+/** Cuts the bars that came apart at their breaks. */
+function listFragments(run: WaveRun): Fragment[] {
+  const { steps, bars } = run.line
+  return bars.flatMap((bar, index) => {
+    const cuts = run.breaks.filter((one) => one.bar === index).map((one) => one.x)
+    if (cuts.length === 0) return []
+    const stops = [bar.from, ...cuts.sort((a, b) => a - b), bar.to]
+    return stops.slice(1).map((to, i) => {
+      const inside = (x: number) => x > stops[i] && x < to
+      return { bar: index, from: stops[i], to, ...sumCells(run, index, steps, inside) }
+    })
+  })
 }
 
 /** Both sides of a node with a law; outside an end both read the bar's face. */

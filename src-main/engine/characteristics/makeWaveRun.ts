@@ -1,11 +1,11 @@
 import { makeNodes } from './makeNodes'
 import { evaluateInitial } from '../line/evaluateInitial'
-import type { Line } from '../line/line'
+import type { Line, Span } from '../line/line'
 import { makeBlocks, type Block } from './block'
 import { makeDelayEnvelope } from './delayEnvelope'
 import { makeDelayLine } from './delayLine'
 import { gradedKernel } from './gradedKernel'
-import { LiveBlock, type WaveRun } from './waveRun'
+import { LiveBlock, Stretch, type WaveRun } from './waveRun'
 
 /**
  * Sets up a line for the method of characteristics: blocks with their initial waves, and the laws
@@ -15,7 +15,8 @@ import { LiveBlock, type WaveRun } from './waveRun'
  */
 export function makeWaveRun(line: Line): WaveRun {
   const plain = (node: number) => line.nodes[node].kind === 'step' && line.nodes[node].loads.length === 0
-  const drafts = makeBlocks(line.spans, plain)
+  const spalls = (span: Span) => line.rig.run.spall && span.source.material.spall !== null
+  const drafts = makeBlocks(line.spans, plain, spalls)
   const size = drafts.reduce((sum, block) => sum + (block.kind === 'graded' ? block.cells + 1 : 0), 0)
   const graded = { size, saved: [] }
   gradedKernel.enter(graded)
@@ -26,7 +27,10 @@ export function makeWaveRun(line: Line): WaveRun {
     slot += draft.cells + 1
     return block
   })
-  return { line, blocks, graded, ...makeNodes(line, blocks) }
+  const stretches = blocks
+    .filter((block) => block.delay === null)
+    .map((block) => new Stretch(block, 0, block.cells, block.left, block.right))
+  return { line, blocks, graded, stretches, breaks: [], ...makeNodes(line, blocks) }
 }
 
 function makeDelayBlock(line: Line, draft: Block): LiveBlock {
@@ -65,5 +69,20 @@ function makeGradedBlock(line: Line, draft: Block, slot: number): LiveBlock {
     leaving: new Float64Array(line.steps + 1),
     leavingOffset: 0,
   })
-  return new LiveBlock(draft, makePort(Z[0]), makePort(Z[cells - 1]), slot, null)
+  const block = new LiveBlock(draft, makePort(Z[0]), makePort(Z[cells - 1]), slot, null)
+  if (line.rig.run.spall) block.strength = makeStrength(line, draft)
+  return block
+}
+
+/** Tension at which each position of a block comes apart: strength times area, the least of both sides [N]. */
+function makeStrength(line: Line, draft: Block): Float64Array | null {
+  const strength = new Float64Array(draft.cells + 1).fill(Infinity)
+  for (let span = draft.firstSpan; span <= draft.lastSpan; span++) {
+    const { source, area } = line.spans[span]
+    const { spall } = source.material
+    if (spall === null) continue
+    const start = draft.spanStart[span - draft.firstSpan]
+    area.forEach((A, p) => (strength[start + p] = Math.min(strength[start + p], spall * A)))
+  }
+  return strength.some((force) => force < Infinity) ? strength : null
 }

@@ -1,3 +1,4 @@
+import { evaluatePlace } from '../line/line'
 import { gradedKernel } from './gradedKernel'
 import { WIDENING } from '../march/widening'
 import type { SpanExtremes, SpanTrace, Stock } from '../march/methodRun'
@@ -51,6 +52,38 @@ export function sumBlock(run: WaveRun, block: LiveBlock, k: number, frame: numbe
     momentum: dt * momentum,
     mass: dt * mass,
   }
+}
+
+/**
+ * Sums mass and momentum of the cells of a bar whose middles lie where asked, after step k.
+ *
+ * @param inside tells by the place along the line [m]
+ */
+export function sumCells(
+  run: WaveRun,
+  bar: number,
+  k: number,
+  inside: (x: number) => boolean,
+): { mass: number; momentum: number } {
+  gradedKernel.enter(run.graded)
+  const { spans, dt } = run.line
+  let mass = 0
+  let momentum = 0
+  for (const block of run.blocks) {
+    if (block.bar !== bar) continue
+    for (let i = 0; i < block.cells; i++) {
+      let s = 0
+      while (i >= block.spanStart[s + 1]) s++
+      const span = spans[block.firstSpan + s]
+      if (!inside(evaluatePlace(span, i - block.spanStart[s] + 0.5))) continue
+      const { delay, slot, impedance, cells } = block
+      mass += dt * (delay ? impedance[0] : impedance[i])
+      momentum += delay
+        ? dt * (delay.line.left[k + i + 1] - delay.line.right[k + cells - i])
+        : dt * (gradedKernel.g[slot + i] - gradedKernel.f[slot + i])
+    }
+  }
+  return { mass, momentum }
 }
 
 /**

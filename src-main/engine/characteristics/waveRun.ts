@@ -6,6 +6,7 @@ import type { Block } from './block'
 import type { DelayEnvelope } from './delayEnvelope'
 import type { DelayLine } from './delayLine'
 import type { HeldState } from '../march/makeHolder'
+import type { Break } from '../march/methodRun'
 
 /** The history of one inner position of a graded block, shape (steps + 1) each. */
 export interface Probe {
@@ -28,6 +29,8 @@ export class LiveBlock implements Block {
   readonly leftNode: number
   readonly rightNode: number
   readonly probes: Probe[] = []
+  /** Tension at which each position comes apart, shape (cells + 1) [N]; null where none does. */
+  strength: Float64Array | null = null
 
   /**
    * @param slot of its first cell in the graded kernel; -1 for a delay line
@@ -51,6 +54,27 @@ export class LiveBlock implements Block {
   }
 }
 
+/** A part of a graded block that is marched in one go: the whole of it, or what lies between two breaks. */
+export class Stretch {
+  /** Slot of its first cell in the graded kernel. */
+  readonly slot: number
+
+  /**
+   * @param start its first position in the block
+   * @param opened steps in which its faces were opened; null for those that always were
+   */
+  constructor(
+    readonly block: LiveBlock,
+    readonly start: number,
+    readonly cells: number,
+    readonly left: Port,
+    readonly right: Port,
+    readonly opened: { left: number | null; right: number | null } = { left: null, right: null },
+  ) {
+    this.slot = block.slot + start
+  }
+}
+
 /** A node with a law of its own between two blocks, or at an end. */
 export interface LiveNode {
   /** Index of the line's node. */
@@ -70,5 +94,9 @@ export interface WaveRun {
   bodies: Body[]
   outside: { left: Outside; right: Outside; loads: Outside[] }
   graded: HeldState
+  /** What is marched of the graded blocks, from left to right. */
+  stretches: Stretch[]
+  /** Where the line has come apart, in order of time. */
+  breaks: Break[]
   beat: Beat
 }

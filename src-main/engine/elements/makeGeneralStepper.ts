@@ -4,7 +4,7 @@ import type { ElementMaterial } from './elementMaterial'
 import { evaluateStartLoss } from './evaluateStartLoss'
 import { LINEAR_BULK, QUADRATIC_BULK } from './makeElementLine'
 import { makeMassSolver } from './massSolver'
-import type { NodeLoad, PieceStepper } from './piece'
+import type { NodeLoad, Stepper } from './piece'
 
 /** What a piece with any of the further laws is made of; element arrays have shape (elements). */
 export interface GeneralPiece {
@@ -36,7 +36,7 @@ export interface GeneralPiece {
  * bulk viscosity `rho h (b1 c + b2^2 h |de/dt|) de/dt`, its quadratic part in compression only; both
  * from the velocities of half a step before.
  */
-export function makeGeneralStepper(piece: GeneralPiece): PieceStepper {
+export function makeGeneralStepper(piece: GeneralPiece): Stepper {
   const { first, last, nodeMass, lateral, loads, dt, length, area, density, material } = piece
   const { v, F } = elementKernel
   const count = last - first
@@ -116,7 +116,7 @@ export function makeGeneralStepper(piece: GeneralPiece): PieceStepper {
       kick[0] = total[0]
       for (let j = 1; j < count; j++) kick[j] = total[j] - total[j - 1]
       kick[count] = -total[count - 1]
-      for (const load of loads) kick[load.position] += load.force(k)
+      for (const load of loads) kick[load.slot - first] += load.force(k)
       solver.solve(kick)
       for (let j = 0; j <= count; j++) kick[j] *= share * dt
     },
@@ -153,8 +153,8 @@ export function makeGeneralStepper(piece: GeneralPiece): PieceStepper {
       if (k === 0) lost.add(evaluateStartLoss(before, old, v, first, dt))
       takeExtremes(k)
     },
-    nodeForce: (position) => (total[position - 1] + total[position]) / 2,
-    keptForce: (position) => (total[position - 1] + total[position]) / 2,
+    nodeForce: (slot) => nodeForce(slot - first),
+    keptForce: (slot) => nodeForce(slot - first),
     kinetic: (frame) => solver.kinetic(v, first, frame),
     strain(start) {
       let sum = 0
@@ -169,12 +169,21 @@ export function makeGeneralStepper(piece: GeneralPiece): PieceStepper {
       }
       return sum
     },
+    momentum() {
+      let sum = 0
+      for (let j = 0; j <= count; j++) sum += nodeMass[j] * v[first + j]
+      return sum
+    },
     dissipated: () => lost.value - lead,
+  }
+
+  function nodeForce(node: number): number {
+    return (total[node - 1] + total[node]) / 2
   }
 
   /** Takes the nodal forces of the step into the envelope. */
   function takeExtremes(k: number): void {
-    for (let j = 1; j < count; j++) elementKernel.widen(first + j, (total[j - 1] + total[j]) / 2, k)
+    for (let j = 1; j < count; j++) elementKernel.widen(first + j, nodeForce(j), k)
   }
 }
 

@@ -1,7 +1,7 @@
 import { CompensatedSum } from '../laws/compensatedSum'
 import { elementKernel } from './elementKernel'
 import { evaluateStartLoss } from './evaluateStartLoss'
-import type { NodeLoad, PieceStepper } from './piece'
+import type { NodeLoad, Stepper } from './piece'
 
 /** What a piece in the kernel is made of. */
 export interface KernelPiece {
@@ -18,7 +18,7 @@ export interface KernelPiece {
  * Makes the stepper of a piece whose elements are linear or elastic-plastic and whose mass is
  * lumped: its loops are those of the kernel.
  */
-export function makeKernelStepper(piece: KernelPiece): PieceStepper {
+export function makeKernelStepper(piece: KernelPiece): Stepper {
   const { first, last, nodeMass, loads, dt, hardening } = piece
   const { v, F, K, Y } = elementKernel
   // Elastic force before the latest step: the strain energy at the half step on is F F' / (2 K).
@@ -44,7 +44,7 @@ export function makeKernelStepper(piece: KernelPiece): PieceStepper {
       if (share !== 1) {
         for (let j = first + 1; j < last; j++) v[j] -= (1 - share) * Y[j] * (F[j] - F[j - 1])
       }
-      for (const load of loads) v[first + load.position] += share * Y[first + load.position] * load.force(k)
+      for (const { slot, force } of loads) v[slot] += share * Y[slot] * force(k)
     },
     finish({ k, vLeft, vRight, keep }) {
       if (keep) for (let i = first; i < last; i++) before[i - first] = F[i]
@@ -57,8 +57,8 @@ export function makeKernelStepper(piece: KernelPiece): PieceStepper {
       }
       if (k === 0) lost.add(evaluateStartLoss(start.force, start.v, v, first, dt))
     },
-    nodeForce: (position) => (F[first + position - 1] + F[first + position]) / 2,
-    keptForce: (position) => (before[position - 1] + before[position]) / 2,
+    nodeForce: (slot) => (F[slot - 1] + F[slot]) / 2,
+    keptForce: (slot) => (before[slot - first - 1] + before[slot - first]) / 2,
     kinetic(frame) {
       let sum = 0
       for (let j = first; j <= last; j++) sum += nodeMass[j - first] * (v[j] + frame) * (v[j] + frame)
@@ -68,6 +68,11 @@ export function makeKernelStepper(piece: KernelPiece): PieceStepper {
       let sum = 0
       for (let i = first; i < last; i++) sum += ((start ? F[i] : before[i - first]) * F[i]) / K[i]
       return (sum * dt) / 2
+    },
+    momentum() {
+      let sum = 0
+      for (let j = first; j <= last; j++) sum += nodeMass[j - first] * v[j]
+      return sum
     },
     dissipated: () => lost.value - plasticLead,
   }

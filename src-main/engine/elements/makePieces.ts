@@ -1,23 +1,13 @@
 import type { Section } from '../../contract/rig'
 import { evaluateInitial } from '../line/evaluateInitial'
 import type { Line, Span } from '../line/line'
+import type { Beat } from '../laws/side'
 import { elementKernel } from './elementKernel'
 import { makeElementMaterial } from './elementMaterial'
+import { makeEndNode } from './makeEndNode'
 import { makeGeneralStepper } from './makeGeneralStepper'
 import { makeKernelStepper } from './makeKernelStepper'
-import type { NodeLoad, PieceStepper } from './piece'
-
-/** A bar cut into elements, before its ends are given to the laws. */
-export interface PieceDraft {
-  bar: number
-  first: number
-  last: number
-  firstSpan: number
-  spanStart: number[]
-  nodeMass: Float64Array
-  loads: NodeLoad[]
-  stepper: PieceStepper
-}
+import type { NodeLoad, Piece, Stepper } from './piece'
 
 /** Elements of one bar, shape (elements) each. */
 interface Elements {
@@ -35,12 +25,13 @@ interface Elements {
  * masses `rho A h`, half at each node, area and polar moment at the element's middle.
  *
  * @param line the line of the run with elements
- * @param makeLoads the loads at a node of the line, by its position in the bar
+ * @param makeLoads the loads at a node of the line, whose slot is given
  */
 export function makePieces(
   line: Line,
-  makeLoads: (node: number, position: number) => NodeLoad[],
-): PieceDraft[] {
+  beat: Beat,
+  makeLoads: (node: number, slot: number) => NodeLoad[],
+): Piece[] {
   let first = 0
   return line.bars.map(({ firstSpan, lastSpan }, bar) => {
     const spans = line.spans.slice(firstSpan, lastSpan + 1)
@@ -48,18 +39,36 @@ export function makePieces(
     for (const span of spans) spanStart.push(spanStart[spanStart.length - 1] + span.cells)
     const count = spanStart[spans.length]
     const elements = cutElements(spans, count)
-    const nodeMass = new Float64Array(count + 1)
-    for (let i = 0; i < count; i++) {
-      const half = (elements.density[i] * elements.area[i] * elements.length[i]) / 2
-      nodeMass[i] += half
-      nodeMass[i + 1] += half
-    }
-    const loads = spans.slice(1).flatMap((_, i) => makeLoads(firstSpan + i + 1, spanStart[i + 1]))
-    fillKernel(line, bar, first, spanStart, elements, nodeMass)
-    const draft = { bar, first, last: first + count, firstSpan, spanStart, nodeMass, loads }
+    const elementMass = elements.density.map((rho, i) => rho * elements.area[i] * elements.length[i])
+    const start = first
+    const loads = spans.slice(1).flatMap((_, i) => makeLoads(firstSpan + i + 1, start + spanStart[i + 1]))
+    fillKernel(line, bar, start, spanStart, elements, elementMass)
     first += count + 1
-    return { ...draft, stepper: makeStepper(line, draft, elements) }
+    const stepper = makeStepper(line, start, elements, elementMass, loads)
+    return {
+      bar,
+      first: start,
+      last: start + count,
+      firstSpan,
+      spanStart,
+      mass: elementMass.reduce((sum, m) => sum + m, 0),
+      stepper,
+      left: makeEndNode(start, stepper, 'left', beat, line.steps),
+      right: makeEndNode(start + count, stepper, 'right', beat, line.steps),
+      probes: [],
+      loads,
+    }
   })
+}
+
+/** Mass of each node of a row of elements: half of each element beside it [kg]. */
+function lumpMass(elementMass: Float64Array): Float64Array {
+  const mass = new Float64Array(elementMass.length + 1)
+  elementMass.forEach((m, i) => {
+    mass[i] += m / 2
+    mass[i + 1] += m / 2
+  })
+  return mass
 }
 
 function cutElements(spans: readonly Span[], count: number): Elements {
@@ -96,7 +105,7 @@ function fillKernel(
   first: number,
   spanStart: number[],
   elements: Elements,
-  nodeMass: Float64Array,
+  elementMass: Float64Array,
 ): void {
   const { v, F, K, Y, R, P } = elementKernel
   const { dt } = line
@@ -108,7 +117,7 @@ function fillKernel(
     R[first + i] = one.yield * A
     P[first + i] = (dt * one.plasticModulus * A) / elements.length[i]
   }
-  nodeMass.forEach((mass, j) => (Y[first + j] = dt / mass))
+  lumpMass(elementMass).forEach((mass, j) => (Y[first + j] = dt / mass))
   for (let span = firstSpan; span <= lastSpan; span++) {
     const start = spanStart[span - firstSpan]
     for (let p = 0; p <= line.spans[span].cells; p++) {
@@ -121,16 +130,22 @@ function fillKernel(
   }
 }
 
-function makeStepper(line: Line, draft: Omit<PieceDraft, 'stepper'>, elements: Elements): PieceStepper {
+function makeStepper(
+  line: Line,
+  first: number,
+  elements: Elements,
+  elementMass: Float64Array,
+  loads: NodeLoad[],
+): Stepper {
   const { run } = line.rig
+  const last = first + elementMass.length
+  const nodeMass = lumpMass(elementMass)
   const material = elements.section.map((section) => makeElementMaterial(section.material))
-  const { first, last, nodeMass, loads } = draft
-  const general =
-    run.finiteStrain || run.lateralInertia || run.bulkViscosity || material.some((one) => one.viscosity > 0)
   // The kernel hardens a whole piece in one way; the general stepper each element in its own.
   const plastic = material.filter((one) => one.yield < Infinity)
   const mixed = plastic.some((one) => one.kinematic !== plastic[0].kinematic)
-  if (general || mixed) {
+  const viscous = material.some((one) => one.viscosity > 0)
+  if (run.finiteStrain || run.lateralInertia || run.bulkViscosity || viscous || mixed) {
     return makeGeneralStepper({
       first,
       last,

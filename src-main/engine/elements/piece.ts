@@ -3,6 +3,7 @@ import type { Side } from '../laws/side'
 
 /** The history of an inner node, shape (steps + 1) each. */
 export interface NodeProbe {
+  /** Node of the piece. */
   position: number
   /** [N] */
   force: Float64Array
@@ -12,25 +13,26 @@ export interface NodeProbe {
 
 /** A force of the surroundings at an inner node. */
 export interface NodeLoad {
-  position: number
+  /** Slot of the node. */
+  slot: number
   force: (k: number) => number
   outside: Outside
   /** Velocity of the node before the step under way [m/s]. */
   before: number
 }
 
-/** One end node of a piece: its side for the law beside it, what the law found, and its history. */
+/** One end node: its side for the law beside it, what the law found, and its history. */
 export interface EndNode {
   side: Side
-  /** Velocity that the law found for the step under way [m/s]. */
-  next: number
+  /** Velocity found for the step under way, or the initial one [m/s]. */
+  velocityNow: number
   /** Shape (steps + 1) [N]. */
   force: Float64Array
   /** Working velocity in the falling frame, shape (steps + 1) [m/s]. */
   velocity: Float64Array
 }
 
-/** One step as the laws at a piece's ends have closed it. */
+/** One step as the laws at both ends have closed it. */
 export interface PieceStep {
   k: number
   /** Share of dt that its forces work. */
@@ -45,7 +47,7 @@ export interface PieceStep {
 }
 
 /** How a piece takes a step: forces inside first, then, once the laws have closed its ends, motion. */
-export interface PieceStepper {
+export interface Stepper {
   /** Finds what the forces inside and the loads do at step k; `share` of a step is 1/2 at k = 0. */
   prepare(k: number, share: number): void
   /** Velocity change of an end node by the forces inside, after `prepare` [m/s]. */
@@ -54,33 +56,35 @@ export interface PieceStepper {
   /** dv/dF of an end node over a whole step [s/kg]. */
   readonly admittanceLeft: number
   readonly admittanceRight: number
-  /** Moves nodes and elements on; the laws have found the ends' velocities and forces. */
+  /** Moves nodes and elements on. */
   finish(step: PieceStep): void
-  /** Force at an inner node at the step under way, between `prepare` and `finish` [N]. */
-  nodeForce(position: number): number
+  /** Force at an inner slot at the step under way, between `prepare` and `finish` [N]. */
+  nodeForce(slot: number): number
   /** The same after a `finish` that was asked to keep it. */
-  keptForce(position: number): number
+  keptForce(slot: number): number
   /** [J] at the half step on, the frame's velocity added [m/s]. */
   kinetic(frame: number): number
   /** [J] at the half step on, or at the start before any step. */
   strain(start: boolean): number
-  /** Plastic work and damping so far [J]. */
+  /** In the falling frame [kg m/s]. */
+  momentum(): number
+  /** Plastic work and damping up to the half step on [J]. */
   dissipated(): number
 }
 
-/** The elements of one bar between its two end nodes. */
+/** The elements of one bar. */
 export interface Piece {
   /** Its bar in the rig. */
   bar: number
-  /** Slot of its first node in the kernel, and of its last. */
+  /** Slots of its first and last node in the kernel. */
   first: number
   last: number
   firstSpan: number
   /** Node of each of its spans' left faces, counted from its first, and its last node. */
   spanStart: number[]
-  /** Mass of each node [kg], shape (last - first + 1). */
-  nodeMass: Float64Array
-  stepper: PieceStepper
+  /** [kg] */
+  mass: number
+  stepper: Stepper
   left: EndNode
   right: EndNode
   probes: NodeProbe[]

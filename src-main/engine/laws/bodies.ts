@@ -86,12 +86,7 @@ export function makeSupport(
  * @param velocity prescribed velocity of step k, in the frame of the ground [m/s]
  * @param outside where its force and work are booked
  */
-export function makeMotion(
-  velocity: (k: number) => number,
-  hand: Hand,
-  beat: Beat,
-  outside: Outside,
-): Side {
+export function makeMotion(velocity: (k: number) => number, hand: Hand, beat: Beat, outside: Outside): Side {
   let last = velocity(0)
   return {
     admittance: () => 0,

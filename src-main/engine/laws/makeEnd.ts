@@ -7,6 +7,7 @@ import type { Outside } from './outside'
 import { makePathJoint } from './pathJoint'
 import { makePathLaw } from './pathLaw'
 import { makePrescribedForce } from './prescribedForce'
+import { sampleForce, sampleMotion } from './samplePulse'
 import type { Beat, Body, Hand, NodeLaw, Side } from './side'
 
 /** The bar's face at an end, as it is at the start. */
@@ -54,11 +55,15 @@ export function makeEnd(end: End, face: EndFace, beat: Beat, outside: Outside, b
     case 'free':
       return makePrescribedForce(bar, hand, () => 0, beat, outside)
     case 'force':
-      return makePrescribedForce(bar, hand, (k) => end.pulse.value(k * dt), beat, outside)
+      return makePrescribedForce(bar, hand, sampleForce(end.pulse, beat), beat, outside)
     case 'fixed':
-      return join(makeMover(() => 0), 'bonded', 0)
+      return join(
+        makeMover(() => 0),
+        'bonded',
+        0,
+      )
     case 'velocity':
-      return join(makeMover((k) => end.pulse.value(timeOf(k))), 'bonded', 0)
+      return join(makeMover(sampleMotion(end.pulse, beat)), 'bonded', 0)
     case 'displacement': {
       const u = (t: number) => (t <= 0 ? 0 : end.pulse.value(t))
       const mover = makeMover((k) => (u(timeOf(k + 0.5)) - u(timeOf(k - 0.5))) / dt)
@@ -70,7 +75,11 @@ export function makeEnd(end: End, face: EndFace, beat: Beat, outside: Outside, b
       return join(beyond, 'bonded', 0)
     }
     case 'wall':
-      return join(makeMover(() => 0), 'contact', end.gap)
+      return join(
+        makeMover(() => 0),
+        'contact',
+        end.gap,
+      )
     case 'mass':
       return join(addBody(makeMass(end.mass, end.velocity, beat)), end.joint, end.gap)
     case 'support':

@@ -30,7 +30,8 @@ export function makeJoint(
     }
     case 'cushion': {
       const { stiffness, curve, unloading, damping, mass, gap, tension } = joint
-      const loading = curve === null ? makeStraightCurve(stiffness!) : makeTableCurve(curve.closing, curve.force)
+      const loading =
+        curve === null ? makeStraightCurve(stiffness!) : makeTableCurve(curve.closing, curve.force)
       const law = makePathLaw(loading, unloading, -gap, tension)
       const [near, far] = mass > 0 ? loadFaces(left, right, mass, beat, bodies) : [left, right]
       return makePathJoint(near, far, law, { damping, pulls: tension }, beat)

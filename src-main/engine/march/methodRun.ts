@@ -40,11 +40,36 @@ export interface NodeTrace {
   velocityRight: Float64Array
 }
 
+/** A place where a bar came apart. */
+export interface Break {
+  bar: number
+  /** Along the line [m]. */
+  x: number
+  /** The smaller of the areas that meet there [m^2]. */
+  area: number
+  /** Tension that opened it [N]. */
+  force: number
+  /** Step in which it opened. */
+  k: number
+}
+
+/** A piece of a bar between its ends and its breaks. */
+export interface Fragment {
+  bar: number
+  /** Along the line [m]. */
+  from: number
+  to: number
+  /** [kg] */
+  mass: number
+  /** In the falling frame [kg m/s]. */
+  momentum: number
+}
+
 /** A line under way by either method, as the records read it. */
 export interface MethodRun extends Method {
   line: Line
   beat: Beat
-  /** Laws by the line's node; nodes without a law of their own are not in it. */
+  /** Laws by the line's node; nodes without a law of their own are not in it. Breaks count from -1 down. */
   laws: Map<number, NodeLaw>
   /** Rigid bodies that move with the line. */
   bodies: Body[]
@@ -64,6 +89,10 @@ export interface MethodRun extends Method {
   addProbe(span: number, position: number): void
   /** The history of a position that was asked for, or of a face. */
   readTrace(span: number, position: number): SpanTrace
+  /** Where bars came apart so far, in order of time. */
+  breaks: readonly Break[]
+  /** The pieces of the bars that came apart, from left to right, after the latest step. */
+  listFragments(): Fragment[]
   /** Both sides of a node that has a law over the run, falling frame; null for other nodes. */
   readNode(node: number): NodeTrace | null
 }

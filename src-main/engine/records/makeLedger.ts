@@ -77,11 +77,7 @@ function sumMass(run: MethodRun): number {
  * Takes stock after step k. Gravity's work is the sum over the steps of `gravity dt P`, P being the
  * momentum in the frame of the ground halfway between two steps.
  */
-function takeStock(
-  run: MethodRun,
-  k: number,
-  start: { momentum: number; mass: number } | null,
-): Balance {
+function takeStock(run: MethodRun, k: number, start: { momentum: number; mass: number } | null): Balance {
   const { dt, rig } = run.line
   const frame = start === null ? 0 : rig.gravity * dt * k
   const stock = { kinetic: 0, strain: 0, dissipated: 0, work: 0, momentum: 0, impulse: 0, scale: 0 }
