@@ -15,6 +15,8 @@ export interface SliceOptions {
   onProgress?: (step: number, steps: number) => void
   /** Heard after each slice; once aborted, the solve rejects with its reason. */
   signal?: AbortSignal
+  /** Carries out the setting up and the finishing, which cannot be sliced. */
+  atOnce?: <T>(action: () => T) => T
 }
 
 /** The result; or the step after which the numbers were no longer finite, which is a fault of ours. */
@@ -32,7 +34,7 @@ export type SliceOutcome = { result: Result } | { brokenAfter: number; steps: nu
 export async function solveInSlices(
   rig: Rig,
   sha256: string,
-  { full = false, onProgress, signal }: SliceOptions = {},
+  { full = false, onProgress, signal, atOnce = (action) => action() }: SliceOptions = {},
 ): Promise<SliceOutcome> {
   let spent = 0
   const spend = <T>(action: () => T): T => {
@@ -42,7 +44,7 @@ export async function solveInSlices(
     return value
   }
 
-  const solve = spend(() => makeSolve(rig, { full }))
+  const solve = spend(() => atOnce(() => makeSolve(rig, { full })))
   let count = FIRST_STEPS
   while (solve.step < solve.steps && !solve.broken) {
     const before = spent
@@ -54,7 +56,7 @@ export async function solveInSlices(
   }
   if (solve.broken) return { brokenAfter: solve.step, steps: solve.steps }
 
-  const { rig: about, run, ...answers } = spend(() => solve.finish())
+  const { rig: about, run, ...answers } = spend(() => atOnce(() => solve.finish()))
   await turn()
   signal?.throwIfAborted()
   return {

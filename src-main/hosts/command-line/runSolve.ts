@@ -1,14 +1,7 @@
-import { setImmediate as turn } from 'node:timers/promises'
-import type { Result } from '../../contract/result'
-import { SOFTWARE } from '../../contract/software'
-import { makeSolve } from '../../engine/solveRig'
+import { solveInSlices, type SliceOutcome } from '../../service/solveInSlices'
 import { makeProgress } from './makeProgress'
 import type { OpenRig } from './openRig'
 import type { Terminal } from './terminal'
-
-/** Time that a slice of the run should take before signals are heard again [ms]. */
-const SLICE = 30
-const FIRST_STEPS = 32
 
 export interface RunOptions {
   /** Keeps the field at every cell and step. */
@@ -30,39 +23,16 @@ export async function runSolve(
   { rig, file }: OpenRig,
   options: RunOptions,
   terminal: Terminal,
-): Promise<{ result: Result } | { brokenAfter: number; steps: number }> {
+): Promise<SliceOutcome> {
   const progress = makeProgress(terminal, options.quiet)
-  const started = terminal.clock()
-  const solve = terminal.atOnce(() => makeSolve(rig, { full: options.full }))
-  let slice = FIRST_STEPS
   try {
-    while (solve.step < solve.steps && !solve.broken) {
-      const before = terminal.clock()
-      solve.advance(Math.min(solve.steps, solve.step + slice))
-      slice = chooseSlice(slice, terminal.clock() - before)
-      progress.show(solve.step / solve.steps)
-      await turn()
-      terminal.signal.throwIfAborted()
-    }
+    return await solveInSlices(rig, file.sha256, {
+      full: options.full,
+      signal: terminal.signal,
+      atOnce: terminal.atOnce,
+      onProgress: (step, steps) => progress.show(step / steps),
+    })
   } finally {
     progress.erase()
   }
-  if (solve.broken) return { brokenAfter: solve.step, steps: solve.steps }
-  const { rig: about, run, ...answers } = terminal.atOnce(() => solve.finish())
-  const solveTime = (terminal.clock() - started) / 1000
-  await turn()
-  terminal.signal.throwIfAborted()
-  return {
-    result: {
-      ...answers,
-      rig: { ...about, sha256: file.sha256 },
-      software: SOFTWARE,
-      run: { ...run, solveTime },
-    },
-  }
-}
-
-/** The number of steps that would have taken the time of a slice, at most four times as many as before. */
-function chooseSlice(steps: number, took: number): number {
-  return Math.max(1, Math.min(4 * steps, Math.round((steps * SLICE) / Math.max(took, 0.1))))
 }
