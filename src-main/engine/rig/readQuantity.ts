@@ -70,12 +70,7 @@ export function readQuantityFormula(
   dimension: DimensionName,
   args: FormulaArguments,
 ): Formula | null {
-  if (Number.isNaN(value)) return null
-  if (typeof value === 'number') {
-    if (dimension === 'number') return makeFixedFormula(value, PLAIN)
-    reading.faults.add(place, faultText.needsUnit(value, dimension))
-    return null
-  }
+  if (typeof value === 'number') return Number.isNaN(value) ? null : makeFixedFormula(value, PLAIN)
   if (typeof value !== 'string') return null
   const read = reading.formula(value, args)
   if (read.formula === null) {

@@ -883,6 +883,14 @@ const pulses: BrokenRig[] = [
     'leftEnd.pulse',
   ),
   value(
+    'a displacement that jumps at a rectangle later on',
+    'leftEnd',
+    moved({ shape: 'rectangle', peak: '1 mm', duration: '5 us', start: '3 us' }),
+    'conflict',
+    'leftEnd.pulse',
+    /a rectangle without rise or fall does/,
+  ),
+  value(
     'a displacement that jumps in a triangle',
     'leftEnd',
     moved({ shape: 'triangle', peak: '1 mm', duration: '5 us', rise: '0 us' }),

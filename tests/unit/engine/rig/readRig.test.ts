@@ -151,6 +151,28 @@ describe('readRig', () => {
     expect(readGood({ variables }).bars[0].uniformVelocity).toBe(Math.sqrt(2 * 9.80665 * 1.5))
   })
 
+  it('bounds the work that the formulas of one file can ask for', () => {
+    const long = Array.from({ length: 35 }, () => 'sqrt(1 mm^2)').join(' + ')
+    const sections = Array.from({ length: 400 }, (_, i) => ({
+      length: '1 mm',
+      diameter: `${i + 20} mm + ${long}`,
+    }))
+    const { faults } = readChanged({
+      bars: [{ name: 'shaft', material: 'steel', sections }],
+      joints: [],
+      gauges: [],
+    })
+    expect(faults.map(({ code, path }) => `${code} ${path}`)).toEqual(['too-large '])
+    expect(faults[0].message).toContain('200000 characters')
+  })
+
+  it('bounds the count of each part', () => {
+    const gauges = Array.from({ length: 1001 }, (_, i) => ({ name: `G${i}`, bar: 'shaft', at: '1 mm' }))
+    expect(readChanged({ gauges }).faults.map(({ code, path }) => `${code} ${path}`)).toEqual([
+      'too-large gauges',
+    ])
+  })
+
   it('takes studies that are right', () => {
     const studies = [
       { kind: 'sweep', name: 'drop', variable: 'drop', from: '1 m', to: '2 m', count: 5 },

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { readGood } from '../readChanged'
+import { readChanged, readGood } from '../readChanged'
 
 describe('ends', () => {
   it('are free where left out', () => {
@@ -66,6 +66,60 @@ describe('joints', () => {
         tension: true,
       },
     ])
+  })
+})
+
+describe('specimens', () => {
+  const specimen = (law: object, more: object = { area: '50 mm^2' }) =>
+    readChanged({ joints: [{ kind: 'specimen', length: '5 mm', law, ...more }] }).faults.map(
+      ({ code, path }) => `${code} ${path}`,
+    )
+  const LATER = 'not-computed-yet joints[0].kind'
+
+  it.each([
+    { kind: 'elastic', modulus: '3 GPa' },
+    { kind: 'elastic', modulus: '3 GPa', rateSensitivity: 0.01, referenceRate: '1 / s' },
+    { kind: 'bilinear', modulus: '70 GPa', yield: '200 MPa', hardening: '1 GPa' },
+    { kind: 'power', strength: '500 MPa', exponent: 0.2 },
+    {
+      kind: 'curve',
+      curve: [
+        [0, '0 MPa'],
+        [0.01, '200 MPa'],
+        ['0.2', '300 MPa'],
+      ],
+    },
+  ])('are read with the law %j, though not computed yet', (law) => {
+    expect(specimen(law)).toEqual([LATER])
+  })
+
+  it.each([
+    [{ kind: 'plastic' }, 'wrong-choice joints[0].law.kind'],
+    [{ kind: 'elastic', modulus: '3 mm' }, 'wrong-dimension joints[0].law.modulus'],
+    [
+      { kind: 'bilinear', modulus: '1 GPa', yield: '200 MPa', hardening: '2 GPa' },
+      'out-of-range joints[0].law.hardening',
+    ],
+    [{ kind: 'power', strength: '500 MPa', exponent: '2 mm' }, 'wrong-dimension joints[0].law.exponent'],
+    [{ kind: 'elastic', modulus: '3 GPa', rateSensitivity: 0.01 }, 'missing joints[0].law.referenceRate'],
+    [
+      {
+        kind: 'curve',
+        curve: [
+          [0, '0 MPa'],
+          [0, '200 MPa'],
+        ],
+      },
+      'out-of-range joints[0].law.curve[1][0]',
+    ],
+  ])('are refused with the law %j', (law, fault) => {
+    expect(specimen(law)).toEqual([LATER, fault])
+  })
+
+  it('need either a diameter or an area', () => {
+    const law = { kind: 'elastic', modulus: '3 GPa' }
+    expect(specimen(law, {})).toEqual([LATER, 'missing joints[0].diameter'])
+    expect(specimen(law, { area: '50 mm^2', diameter: '8 mm' })).toEqual(['conflict joints[0]', LATER])
   })
 })
 
