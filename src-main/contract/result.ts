@@ -11,6 +11,8 @@ export interface Result {
   envelope: EnvelopeTable
   sections: SectionPeaks[]
   governing: Governing | null
+  /** A row for each bar with a fatigue line, from the left; empty where no material has one. */
+  fatigue: FatigueAnswer[]
   striker: StrikerAnswer | null
   gauges: GaugeTable[]
   joints: JointTable[]
@@ -20,7 +22,9 @@ export interface Result {
   momentum: { closure: number }
   wavefronts: Wavefront[]
   field: FieldTable
-  comparison: null
+  comparison: Comparison | null
+  spalls: Spall[]
+  fragments: FragmentState[]
   cautions: Caution[]
   notice: string
 }
@@ -273,6 +277,42 @@ export interface Wavefront {
   force: number
   /** True where a taper spreads it. */
   spread: boolean
+}
+
+/** How far the two methods are apart, each difference as a share of the largest stress it is measured by. */
+export interface Comparison {
+  /** Largest difference of the envelope over the largest stress in the line. */
+  envelope: number
+  /** Where [m] and in which sense. */
+  envelopeAt: number
+  envelopeSense: 'tension' | 'compression'
+  /** By gauge: largest and root mean square difference of stress over the largest stress there. */
+  gauges: { name: string; largest: number; rootMeanSquare: number }[]
+  /** What it means and which method to trust, in one or two sentences. */
+  verdict: string
+}
+
+/** A place where a bar came apart. */
+export interface Spall {
+  bar: string
+  /** [m] */
+  x: number
+  /** [s] */
+  time: number
+  /** Tension that opened it [Pa]. */
+  stress: number
+}
+
+/** A piece of a bar that came apart, at the end of the run. */
+export interface FragmentState {
+  bar: string
+  /** [m] */
+  from: number
+  to: number
+  /** [kg] */
+  mass: number
+  /** Mean velocity [m/s]. */
+  velocity: number
 }
 
 export interface FieldTable {

@@ -77,6 +77,22 @@ export const RESULT_SHAPE: ShapeOf<Result> = {
     { bar: null, section: null, from: null, to: null, tension: SENSE_PEAK, compression: SENSE_PEAK },
   ],
   governing: { bar: null, section: null, sense: null, margin: null },
+  fatigue: [
+    {
+      bar: null,
+      section: null,
+      at: null,
+      kt: null,
+      strength: null,
+      exponent: null,
+      amplitude: null,
+      cycles: null,
+      largest: [{ range: null, mean: null, count: null, damage: null }],
+      damage: null,
+      damageFirstHalf: null,
+      impacts: null,
+    },
+  ],
   striker: { name: null, speed: null, pulseLength: null, pulseDuration: null, safeSpeed: null },
   gauges: [
     {
@@ -115,7 +131,15 @@ export const RESULT_SHAPE: ShapeOf<Result> = {
     { fromX: null, fromT: null, toX: null, toT: null, direction: null, force: null, spread: null },
   ],
   field: { x: null, t: null, stress: null },
-  comparison: null,
+  comparison: {
+    envelope: null,
+    envelopeAt: null,
+    envelopeSense: null,
+    gauges: [{ name: null, largest: null, rootMeanSquare: null }],
+    verdict: null,
+  },
+  spalls: [{ bar: null, x: null, time: null, stress: null }],
+  fragments: [{ bar: null, from: null, to: null, mass: null, velocity: null }],
   cautions: [{ code: null, message: null, where: null }],
   notice: null,
 }

@@ -1,122 +1,121 @@
-import { NOTICE } from '../contract/notice'
-import type { Result } from '../contract/result'
 import type { Rig } from '../contract/rig'
-import { answerStriker } from './answers/answerStriker'
-import { answerTapers } from './answers/answerTapers'
-import { findGoverning } from './answers/findGoverning'
-import { listCautions } from './answers/listCautions'
-import { listInterfaces } from './answers/listInterfaces'
-import { listSectionPeaks } from './answers/listSectionPeaks'
-import { tabulateEnvelope } from './answers/tabulateEnvelope'
-import { tabulateGauges } from './answers/tabulateGauges'
-import { tabulateEnds, tabulateJoints } from './answers/tabulateJoints'
-import { traceWavefronts } from './answers/traceWavefronts'
+import { listFatigue } from './answers/fatigue/listFatigue'
+import { type FatiguePlace, listFatiguePlaces } from './answers/fatigue/listFatiguePlaces'
+import { compareMethods } from './answers/compareMethods'
 import { makeWaveMethod } from './characteristics/makeWaveMethod'
+import { makeElementLine } from './elements/makeElementLine'
+import { makeElementMethod } from './elements/makeElementMethod'
+import { assembleSolution, type Solution } from './assembleSolution'
 import { makeLine } from './line/makeLine'
 import type { Line } from './line/line'
-import { makeMarch } from './march/march'
-import { makeRecords } from './records/makeRecords'
+import { makeMarch, type March } from './march/march'
+import type { MethodRun } from './march/methodRun'
+import { makeRecords, type Records } from './records/makeRecords'
 import type { RunRecord } from './records/record'
 
-/** What the engine finds; the host adds the file's digest, its own version and the time taken. */
-export type Solution = Omit<Result, 'rig' | 'software' | 'run'> & {
-  rig: Pick<Result['rig'], 'title'>
-  run: Omit<Result['run'], 'solveTime'>
-}
+export type { Solution }
 
 /** A rig on its way to a solution, marched slice by slice by its host. */
 export interface Solve {
   readonly line: Line
-  /** Steps done so far, out of `steps`. */
+  /** Steps done so far, out of `steps`, over all its runs. */
   readonly step: number
   readonly steps: number
-  /** True once the numbers have stopped being finite; the run goes no further. */
+  /** True once the numbers have stopped being finite; the solve goes no further. */
   readonly broken: boolean
   advance(toStep: number): void
   /** The solution; call once step = steps. */
   finish(): Solution
 }
 
+/** One run of a solve. */
+interface Phase {
+  run: MethodRun
+  records: Records
+  march: March
+}
+
 /**
- * Sets up the solution of a rig by characteristics.
+ * Sets up the solution of a rig by the method its run asks for; `both` runs one after the other and
+ * compares them. Where a material has a fatigue line the main method runs once more to watch the
+ * places that the first run found worst.
  *
  * @param rig a checked rig; its size was checked by the reader
  * @param options full: keep the field at every cell and step
  */
 export function makeSolve(rig: Rig, options: { full?: boolean } = {}): Solve {
-  const line = makeLine(rig)
-  const run = makeWaveMethod(line)
-  const records = makeRecords(run, options.full ?? false)
-  const march = makeMarch(run, records, line.steps)
+  const waveLine = makeLine(rig)
+  const { method } = rig.run
+  const line = method === 'elements' ? makeElementLine(waveLine) : waveLine
+  const makeMain = () => (method === 'elements' ? makeElementMethod(line) : makeWaveMethod(line))
+  const watches = rig.bars.some((bar) => bar.sections.some((section) => section.material.fatigue !== null))
+
+  const main = makePhase(makeMain(), options.full ?? false)
+  const planned = [line.steps + 1]
+  const other = method === 'both' ? makeElementLine(waveLine) : null
+  if (other !== null) planned.push(other.steps + 1)
+  if (watches) planned.push(line.steps + 1)
+  const steps = planned.reduce((sum, count) => sum + count, 0)
+
+  const done: Phase[] = []
+  let phase = main
+  let mainRecord: RunRecord | null = null
+  let places: FatiguePlace[] = []
+
+  /** The run after the one that has ended; null after the last. */
+  function makeNext(): Phase | null {
+    mainRecord ??= main.records.finish()
+    if (other !== null && done.length === 1) return makePhase(makeElementMethod(other), false)
+    if (!watches || done.length === planned.length) return null
+    places = listFatiguePlaces(line, mainRecord)
+    const run = makeMain()
+    for (const { span, position } of places) run.addProbe(span, position)
+    return makePhase(run, false)
+  }
+
+  function countDone(): number {
+    return done.reduce((sum, one) => sum + one.march.end, 0)
+  }
+
   return {
     line,
+    steps,
     get step() {
-      return march.step
+      return done.includes(phase) ? countDone() : countDone() + phase.march.step
     },
-    steps: march.end,
     get broken() {
-      return march.broken
+      return phase.march.broken
     },
-    advance: (toStep) => march.advance(toStep),
-    finish: () => assemble(line, records.finish()),
+    advance(toStep) {
+      phase.march.advance(toStep - (done.includes(phase) ? 0 : countDone()))
+      if (phase.march.step < phase.march.end || done.includes(phase)) return
+      done.push(phase)
+      phase = makeNext() ?? phase
+    },
+    finish() {
+      const record = mainRecord!
+      const fatigue = watches ? listFatigue(line, places, readStress(done[planned.length - 1], line)) : []
+      const compared = other === null ? null : { line: other, record: done[1].records.finish() }
+      return assembleSolution(line, record, {
+        method: method === 'elements' ? 'elements' : 'characteristics',
+        breaks: main.run.breaks,
+        fragments: main.run.listFragments(),
+        comparison: compared && compareMethods({ line, record }, compared),
+        fatigue,
+      })
+    },
   }
 }
 
-/** Makes the answers from the records of a finished run. */
-function assemble(line: Line, record: RunRecord): Solution {
-  const { rig, dt } = line
-  const sections = listSectionPeaks(line, record)
-  const governing = findGoverning(sections)
-  const { energy, field } = record
-  const times = Array.from(energy.step, (k) => k * dt)
-  return {
-    format: 'barwright-result/1',
-    rig: { title: rig.title },
-    method: 'characteristics',
-    run: {
-      timeStep: dt,
-      steps: line.steps,
-      cells: line.spans.reduce((sum, span) => sum + span.cells, 0),
-      duration: rig.run.duration,
-      travelTimeRounding: line.rounding.map(({ bar, section, error }) => ({
-        bar: rig.bars[bar].name,
-        section,
-        error,
-      })),
-    },
-    line: {
-      length: line.length,
-      bars: line.bars.map(({ name, from, to, mass, travelTime }) => ({ name, from, to, mass, travelTime })),
-    },
-    interfaces: listInterfaces(line),
-    tapers: answerTapers(line),
-    envelope: tabulateEnvelope(line, record.envelope),
-    sections,
-    governing,
-    striker: answerStriker(line, governing),
-    gauges: tabulateGauges(line, record.gauges),
-    joints: tabulateJoints(line, record),
-    ends: tabulateEnds(line, record),
-    bars: record.bars.map(({ momentum, mass, kinetic, strain }, i) => ({
-      name: rig.bars[i].name,
-      momentum,
-      velocity: momentum / mass,
-      kinetic,
-      strain,
-    })),
-    energy: {
-      t: times,
-      kinetic: Array.from(energy.kinetic),
-      strain: Array.from(energy.strain),
-      dissipated: Array.from(energy.dissipated),
-      work: Array.from(energy.work),
-      closure: energy.closure,
-    },
-    momentum: { closure: energy.momentumClosure },
-    wavefronts: traceWavefronts(line, record),
-    field: { x: Array.from(field.x), t: times, stress: field.stress.map((row) => Array.from(row)) },
-    comparison: null,
-    cautions: listCautions(line, record, sections),
-    notice: NOTICE,
+function makePhase(run: MethodRun, full: boolean): Phase {
+  const records = makeRecords(run, full)
+  return { run, records, march: makeMarch(run, records, run.line.steps) }
+}
+
+/** Nominal stress at a watched place over the run [Pa]. */
+function readStress({ run }: Phase, line: Line): (place: FatiguePlace) => Float64Array {
+  return ({ span, position }) => {
+    const area = line.spans[span].area[position]
+    return run.readTrace(span, position).force.map((force) => force / area)
   }
 }
