@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto'
 import type { Result } from '../../contract/result'
 import { markup, Markup } from '../markup'
 import { makeReportStyle } from './reportStyle'
+import { drawFatiguePart } from './drawFatiguePart'
 import { drawHead } from './drawHead'
 import { drawLinePart } from './drawLinePart'
 import { drawProofPart } from './drawProofPart'
@@ -44,6 +45,7 @@ export function* writeReportParts(result: Result, rigText?: string): Generator<s
 `.text
   yield drawHead(result).text
   yield drawStressPart(result).text
+  yield drawFatiguePart(result.fatigue).text
   yield drawLinePart(result).text
   for (const part of drawRunParts(result)) yield part.text
   yield drawProofPart(result, rigText).text

@@ -2,6 +2,7 @@ import type { Result } from '../../contract/result'
 import { describeGoverning } from '../../documents/describeGoverning'
 import { cleanLine } from '../../documents/format/cleanLine'
 import { listClosures, listRunFacts, listStrikerFacts } from '../../documents/listFacts'
+import { makeFatigueTable } from '../../documents/tables/fatigueTables'
 import { makePulsesTable } from '../../documents/tables/gaugeTables'
 import { makePeaksTable } from '../../documents/tables/peaksTable'
 import { writeTextTable } from '../../documents/tables/writeTextTable'
@@ -15,13 +16,16 @@ const PULSES_PER_GAUGE = 4
  * Writes a result for the terminal, with what decides first.
  *
  * @param result - SI
- * @returns governing margin, striker, peaks, first pulses at the gauges, closures, cautions and notice
+ * @returns governing margin, striker, peaks, impacts to failure where known, first pulses at the gauges, closures, cautions and notice
  */
 export function writeSolveTables(result: Result): string {
   return [
     writeGoverning(result),
     `Striker\n${writeFacts(listStrikerFacts(result.striker))}`,
     `Peaks and margins of the sections\n${writeTextTable(makePeaksTable(result))}`,
+    ...(result.fatigue.length === 0
+      ? []
+      : [`Fatigue: equal impacts to failure\n${writeTextTable(makeFatigueTable(result.fatigue))}`]),
     result.gauges.length === 0
       ? 'Gauges: none\n'
       : `First pulses at the gauges\n${writeTextTable(makePulsesTable(result.gauges, PULSES_PER_GAUGE))}`,

@@ -96,6 +96,25 @@ export function makeTestResult(): Result {
       },
     ],
     governing: { bar: 'shaft', section: 0, sense: 'compression', margin: makePeak(-250.5e6, 900e6).margin! },
+    fatigue: [
+      {
+        bar: 'shaft',
+        section: 0,
+        at: 0.8,
+        kt: null,
+        strength: 1.2e9,
+        exponent: -0.09,
+        amplitude: 170.25e6,
+        cycles: 3,
+        largest: [
+          { range: 340.5e6, mean: -80.25e6, count: 1, damage: 7.6e-10 },
+          { range: 90e6, mean: 0, count: 2, damage: 2e-15 },
+        ],
+        damage: 7.6e-10,
+        damageFirstHalf: 7.6e-10,
+        impacts: 1.3e9,
+      },
+    ],
     striker: { name: 'striker', speed: 12, pulseLength: 0.6, pulseDuration: 116.8e-6, safeSpeed: 25.4 },
     gauges: [
       {
@@ -149,6 +168,8 @@ export function makeTestResult(): Result {
     ],
     field: makeField(),
     comparison: null,
+    spalls: [{ bar: 'shaft', x: 1.1, time: 3.1e-4, stress: 1.5e9 }],
+    fragments: [{ bar: 'shaft', from: 1.1, to: 1.2, mass: 0.55, velocity: 7.4 }],
     cautions: [
       { code: 'flat-faces', message: 'Contacts are taken as flat faces.', where: 'striker | shaft' },
       { code: 'user-values', message: "Allowables are the user's own.", where: '' },

@@ -48,6 +48,7 @@ describe('a report is one page that stands alone', () => {
       'Peaks and margins of the sections',
       'Envelope',
       'Stress over place and time',
+      'Fatigue',
       'The line',
       'Steps and joints',
       'Tapers',

@@ -36,50 +36,61 @@ export function listFatigueCautions(line: Line, fatigue: readonly FatigueAnswer[
   return [...listOutOfRange(rows), describeBasis(line, rows)]
 }
 
+type RangeFault = 'strength' | 'few' | 'many' | 'yield'
+
 function listOutOfRange(rows: Row[]): Caution[] {
-  const judged = rows
-    .map((row) => ({ ...row, reasons: judgeRange(row) }))
-    .filter(({ reasons }) => reasons.length > 0)
-  if (judged.length === 0) return []
-  const reasons = [...new Set(judged.flatMap((row) => row.reasons))]
+  const places: string[] = []
+  const reasons = new Map<RangeFault, string>()
+  const life = ({ answer }: Row): number =>
+    evaluateBasquin(answer.strength, answer.exponent, answer.amplitude)
+  // The shortest life first: of each kind the worst row is told, all are named.
+  for (const row of [...rows].sort((one, other) => life(one) - life(other))) {
+    const faults = listRangeFaults(row, life(row))
+    if (faults.length > 0) places.push(row.place)
+    for (const [kind, words] of faults) if (!reasons.has(kind)) reasons.set(kind, words)
+  }
+  if (places.length === 0) return []
   return [
     {
       code: 'fatigue-range',
       message:
-        `Impacts to failure leave the range of the fatigue line: ${reasons.join('; ')}. The number is no ` +
+        `Impacts to failure leave the range of the fatigue line: ${[...reasons.values()].join('; ')}. The number is no ` +
         'estimate of a life there; take it as a sign of which side of the range the part is on.',
-      where: joinPlaces(judged.map(({ place }) => place)),
+      where: joinPlaces(places),
     },
   ]
 }
 
-/** Why the answer leaves the range of its line; empty where it does not. */
-function judgeRange({ answer, yield: limit }: Row): string[] {
-  const { amplitude, strength, exponent, largest } = answer
-  const life = evaluateBasquin(strength, exponent, amplitude)
-  const reasons: string[] = []
+/** Where the answer leaves the range of its line, in words; empty where it does not. */
+function listRangeFaults({ answer, yield: limit }: Row, life: number): [RangeFault, string][] {
+  const { amplitude, strength, largest } = answer
+  const faults: [RangeFault, string][] = []
   if (amplitude >= strength)
-    reasons.push(
+    faults.push([
+      'strength',
       `the local amplitude, ${describeQuantity(amplitude, 'stress')}, is not under the strength coefficient, ` +
         `${describeQuantity(strength, 'stress')}: by its line the part breaks at the first impact`,
-    )
+    ])
   else if (life < FEWEST)
-    reasons.push(
-      `by the line the largest range alone lasts ${Number(life.toPrecision(3))} cycles; under about 1000, plastic strain ` +
-        'decides and a stress line does not hold',
-    )
+    faults.push([
+      'few',
+      `by the line the largest range alone lasts ${Number(life.toPrecision(3))} cycles; under about 1000, plastic ` +
+        'strain decides and a stress line does not hold',
+    ])
   else if (life > MOST && amplitude > 0)
-    reasons.push(
+    faults.push([
+      'many',
       `by the line even the largest range lasts ${life.toExponential(1)} cycles, more than the about 1e7 to which ` +
         'lines are usually measured',
-    )
+    ])
   const highest = largest.length === 0 ? 0 : Math.abs(largest[0].mean) + largest[0].range / 2
   if (limit !== null && highest > limit)
-    reasons.push(
+    faults.push([
+      'yield',
       `the local stress reaches ${describeQuantity(highest, 'stress')}, over the yield stress of ` +
         `${describeQuantity(limit, 'stress')}, while the count takes it as elastic`,
-    )
-  return reasons
+    ])
+  return faults
 }
 
 function describeBasis(line: Line, rows: Row[]): Caution {

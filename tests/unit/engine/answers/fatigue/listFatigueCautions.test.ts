@@ -62,6 +62,17 @@ describe('cautions on fatigue', () => {
     expect(range([0, -0.5e9, 0], soft)).toContain('reaches 500 MPa, over the yield stress of 300 MPa')
   })
 
+  it('tell the worst of several places of one kind once', () => {
+    const shaft = makeShaft()
+    const one = { bar: 0, section: 0, span: 0, position: 2, kt: null }
+    const [slight] = listFatigue(shaft, [one], () => Float64Array.of(0, -0.02e9, 0))
+    const [mild] = listFatigue(shaft, [{ ...one, section: 1, span: 1 }], () => Float64Array.of(0, -0.2e9, 0))
+    const [range] = listFatigueCautions(shaft, [slight, mild])
+    expect(range.where).toBe('shaft, section 2; shaft, section 1')
+    expect(range.message.match(/lasts/g)).toHaveLength(1)
+    expect(range.message).toContain('lasts 5.0e+9 cycles')
+  })
+
   it('do not cry where the life is within 1e3 and 1e7 cycles, or nothing moves', () => {
     // 1e3 cycles: 0.5 x^-10 = 1e3 at amplitude 0.4676 GPa; 1e7: 0.1862 GPa.
     expect(codes([0, -0.93e9, 0, 0, 0])).toEqual(['fatigue-basis'])
