@@ -28,7 +28,8 @@ export function advanceWaves(run: WaveRun, from: number, to: number): void {
   }
   for (const block of delays) {
     flushDelayLine(block.delay!.line, from, to)
-    block.delay!.envelope.advance(to)
+    block.delay!.tension.advance(to)
+    block.delay!.compression.advance(to)
   }
 }
 

@@ -46,7 +46,9 @@ function split(run: WaveRun, index: number, at: number, force: number, k: number
   })
   run.stretches.splice(index, 1, near, far)
   const law = makeContact(makeBarSide(near.right, 1), makeBarSide(far.left, -1), 0, run.beat)
-  run.nodes.push({ index: -1 - run.breaks.length, law, leftBlock: -1, rightBlock: -1 })
+  const node = -1 - run.breaks.length
+  run.nodes.push({ index: node, law, leftBlock: -1, rightBlock: -1 })
+  run.laws.set(node, law)
   // A watched node that opens is watched one cell to its left from then on.
   for (const probe of block.probes) if (probe.position === start + at) probe.position--
   run.breaks.push({

@@ -1,20 +1,20 @@
+import { WIDENING } from '../march/widening'
 import type { DelayLine } from './delayLine'
 import { makeTileBounds } from './tileBounds'
-import { type Extremes, TILE, tileKernel } from './tileKernel'
-import { WIDENING } from '../march/widening'
+import { type Peaks, TILE, tileKernel } from './tileKernel'
 
 /** Rows of tiles taken together: enough that most tiles meet the peak of their place before it is passed. */
 const WINDOW = 256
 
-/** Envelope of a delay line's force at each of its positions, kept as it is marched. */
-export interface DelayEnvelope extends Extremes {
+/** Largest force of one sign at each position of a delay line, kept as it is marched. */
+export interface DelayEnvelope extends Peaks {
   /** Takes in all steps before `to`; those of an unfinished window wait unless `to` is the end of the run. */
   advance(to: number): void
 }
 
 /**
- * Keeps the largest tension and compression `F = right[k - p + n] + left[k + p]` of a delay line,
- * with the first step at which each is reached.
+ * Keeps the largest tension, or the largest compression, of `F = right[k - p + n] + left[k + p]` of a
+ * delay line, with the first step at which it is reached.
  *
  * The (position, step) plane is cut into tiles of 16 by 16. A tile whose largest right-going plus
  * largest left-going wave cannot pass the envelope so far is skipped: exact, and nearly all are.
@@ -22,49 +22,39 @@ export interface DelayEnvelope extends Extremes {
  * first, without settling the time; the tiles that may pass it then follow in order of time.
  *
  * @param line the delay line, filled up to the steps that are taken in
+ * @param sign +1 for tension; -1 for compression, whose force is then counted positive
  * @param end number of steps the run will have recorded (steps + 1)
  */
-export function makeDelayEnvelope(line: DelayLine, end: number): DelayEnvelope {
+export function makeDelayEnvelope(line: DelayLine, sign: 1 | -1, end: number): DelayEnvelope {
   const positions = line.cells + 1
   const tiles = Math.ceil(positions / TILE)
   const rows = Math.ceil(end / TILE)
-  const bounds = makeTileBounds(line, tiles, rows)
-  const extremes: Extremes = {
-    high: new Float64Array(positions),
-    low: new Float64Array(positions),
-    highStep: new Int32Array(positions),
-    lowStep: new Int32Array(positions),
-  }
-  // Least of `high` and largest of `low` over each column of tiles.
-  const leastHigh = new Float64Array(tiles)
-  const largestLow = new Float64Array(tiles)
+  const bounds = makeTileBounds(line, sign, tiles, rows)
+  const peaks: Peaks = { sign, peak: new Float64Array(positions), step: new Int32Array(positions) }
+  // Least peak over each column of tiles.
+  const least = new Float64Array(tiles)
   let nextRow = 0
 
   function scanTile(tile: number, row: number, to: number, share: number): void {
     const p0 = tile * TILE
     const k0 = row * TILE
-    tileKernel.scan(line, p0, Math.min(positions, p0 + TILE), k0, Math.min(to, k0 + TILE), extremes, share)
-    leastHigh[tile] = tileKernel.leastHigh
-    largestLow[tile] = tileKernel.largestLow
+    const p1 = Math.min(positions, p0 + TILE)
+    least[tile] = tileKernel.scan(line, p0, p1, k0, Math.min(to, k0 + TILE), peaks, share)
   }
 
   function scanColumn(tile: number, from: number, until: number, to: number): void {
-    bounds.findBest(tile, from, until)
-    const { highRow, lowRow } = bounds
-    const rises = bounds.upper(tile, highRow) > leastHigh[tile]
-    const sinks = bounds.lower(tile, lowRow) < largestLow[tile]
-    if (!rises && !sinks) return
-    if (rises) scanTile(tile, highRow, to, 1 / WIDENING)
-    if (sinks) scanTile(tile, lowRow, to, 1 / WIDENING)
-    let row = bounds.findNext(tile, from, until, leastHigh[tile], largestLow[tile])
+    const best = bounds.findBest(tile, from, until)
+    if (bounds.bound(tile, best) <= least[tile]) return
+    scanTile(tile, best, to, 1 / WIDENING)
+    let row = bounds.findNext(tile, from, until, least[tile])
     while (row < until) {
       scanTile(tile, row, to, WIDENING)
-      row = bounds.findNext(tile, row + 1, until, leastHigh[tile], largestLow[tile])
+      row = bounds.findNext(tile, row + 1, until, least[tile])
     }
   }
 
   return {
-    ...extremes,
+    ...peaks,
     advance(to) {
       while (nextRow < rows && (to === end || (nextRow + WINDOW) * TILE <= to)) {
         const until = Math.min(nextRow + WINDOW, rows)

@@ -1,9 +1,9 @@
 import type { Line } from '../line/line'
-import type { Fragment, MethodRun, NodeTrace, SpanExtremes, Stock } from '../march/methodRun'
+import type { Fragment, MethodRun, NodeTrace, SpanExtremes, SpanPlace, Stock } from '../march/methodRun'
 import { advanceWaves } from './advanceWaves'
 import { makeWaveRun } from './makeWaveRun'
-import { readExtremes, readForce, readTrace, sumBlock, sumCells } from './readWaves'
-import type { WaveRun } from './waveRun'
+import { readExtremes, readForces, readTrace, sumBlock, sumCells } from './readWaves'
+import type { LiveBlock, WaveRun } from './waveRun'
 
 /**
  * Sets up a line for the method of characteristics.
@@ -19,20 +19,14 @@ export function makeWaveMethod(line: Line): MethodRun {
   return {
     line,
     beat: run.beat,
-    get laws() {
-      return new Map(run.nodes.map((node) => [node.index, node.law]))
-    },
+    laws: run.laws,
     breaks: run.breaks,
     listFragments: () => listFragments(run),
     bodies: run.bodies,
     outside: run.outside,
     advance: (from, to) => advanceWaves(run, from, to),
     sumBar: (bar, k, frame) => sumBar(run, bar, k, frame),
-    readForce(span, position, k) {
-      const { block, at } = seat(span, position)
-      const opened = at > 0 && run.stretches.find((one) => one.block === block && one.start === at)
-      return opened ? opened.left.arriving[k] + opened.left.leaving[k] : readForce(block, at, k)
-    },
+    makeForceReader: (places) => makeForceReader(run, places),
     readExtremes: (span) => cutExtremes(run, span),
     addProbe(span, position) {
       const { block, at } = seat(span, position)
@@ -46,6 +40,22 @@ export function makeWaveMethod(line: Line): MethodRun {
       return readTrace(run, block, at)
     },
     readNode: (node) => readNode(run, node),
+  }
+}
+
+/** Gathers the places block by block, so that each block is read in one loop. */
+function makeForceReader(run: WaveRun, places: readonly SpanPlace[]): (k: number, row: Float64Array) => void {
+  const parts: { block: LiveBlock; positions: number[]; at: number }[] = []
+  places.forEach(({ span, position }, i) => {
+    const block = run.blocks.find((one) => span >= one.firstSpan && span <= one.lastSpan)!
+    const last = parts[parts.length - 1]
+    const here = block.spanStart[span - block.firstSpan] + position
+    if (last?.block === block) last.positions.push(here)
+    else parts.push({ block, positions: [here], at: i })
+  })
+  const ready = parts.map((part) => ({ ...part, positions: Int32Array.from(part.positions) }))
+  return (k, row) => {
+    for (const { block, positions, at } of ready) readForces(run, block, positions, k, row, at)
   }
 }
 

@@ -30,7 +30,9 @@ export function makeWaveRun(line: Line): WaveRun {
   const stretches = blocks
     .filter((block) => block.delay === null)
     .map((block) => new Stretch(block, 0, block.cells, block.left, block.right))
-  return { line, blocks, graded, stretches, breaks: [], ...makeNodes(line, blocks) }
+  const { nodes, ...rest } = makeNodes(line, blocks)
+  const laws = new Map(nodes.map((node) => [node.index, node.law]))
+  return { line, blocks, graded, stretches, breaks: [], nodes, laws, ...rest }
 }
 
 function makeDelayBlock(line: Line, draft: Block): LiveBlock {
@@ -46,7 +48,8 @@ function makeDelayBlock(line: Line, draft: Block): LiveBlock {
   const right = { impedance: Z, arriving: delay.right, leaving: delay.left, leavingOffset: n }
   return new LiveBlock(draft, left, right, -1, {
     line: delay,
-    envelope: makeDelayEnvelope(delay, line.steps + 1),
+    tension: makeDelayEnvelope(delay, 1, line.steps + 1),
+    compression: makeDelayEnvelope(delay, -1, line.steps + 1),
   })
 }
 

@@ -23,10 +23,12 @@ export function sumBlock(run: WaveRun, block: LiveBlock, k: number, frame: numbe
     for (let i = 0; i < n; i++) {
       const fi = right[k + n - i]
       const gi = left[k + i + 1]
-      const v = gi - fi + Z * frame
+      const difference = gi - fi
+      const v = difference + Z * frame
+      const sum = fi + gi
       kinetic += v * v
-      strain += (fi + gi) * (fi + gi)
-      momentum += gi - fi
+      strain += sum * sum
+      momentum += difference
     }
     kinetic /= Z
     strain /= Z
@@ -87,15 +89,39 @@ export function sumCells(
 }
 
 /**
- * Force at a position of a block at step k [N]. For a delay line any step marched so far; for the
- * inside of a graded block the latest step only.
+ * Reads the force at positions of a block after the latest step k into a row [N].
+ *
+ * @param positions of the block, shape (count)
+ * @param at first place of the row to fill
  */
-export function readForce(block: LiveBlock, position: number, k: number): number {
-  const { delay, cells, left, right } = block
-  if (delay) return delay.line.right[k - position + cells] + delay.line.left[k + position]
+export function readForces(
+  run: WaveRun,
+  block: LiveBlock,
+  positions: Int32Array,
+  k: number,
+  row: Float64Array,
+  at: number,
+): void {
+  const { delay, cells } = block
+  if (delay) {
+    const { right, left } = delay.line
+    for (let i = 0; i < positions.length; i++) {
+      row[at + i] = right[k - positions[i] + cells] + left[k + positions[i]]
+    }
+    return
+  }
+  gradedKernel.enter(run.graded)
+  positions.forEach((position, i) => {
+    row[at + i] = readGraded(run, block, position, k)
+  })
+}
+
+function readGraded(run: WaveRun, block: LiveBlock, position: number, k: number): number {
+  const { left, right, cells } = block
   if (position === 0) return left.arriving[k] + left.leaving[k]
   if (position === cells) return right.arriving[k] + right.leaving[k]
-  return evaluateInner(block, position)
+  const opened = run.breaks.length > 0 && run.stretches.find((s) => s.block === block && s.start === position)
+  return opened ? opened.left.arriving[k] + opened.left.leaving[k] : evaluateInner(block, position)
 }
 
 /**
@@ -113,8 +139,13 @@ function evaluateInner(block: LiveBlock, position: number): number {
 export function readExtremes(run: WaveRun, block: LiveBlock): SpanExtremes {
   const narrow = (values: Float64Array) => values.map((value) => value / WIDENING)
   if (block.delay) {
-    const { envelope } = block.delay
-    return { ...envelope, high: narrow(envelope.high), low: narrow(envelope.low) }
+    const { tension, compression } = block.delay
+    return {
+      high: narrow(tension.peak),
+      low: narrow(compression.peak).map((value) => 0 - value),
+      highStep: tension.step,
+      lowStep: compression.step,
+    }
   }
   gradedKernel.enter(run.graded)
   const { high, low, highStep, lowStep } = gradedKernel
@@ -133,19 +164,22 @@ export function readTrace(run: WaveRun, block: LiveBlock, position: number): Spa
   const count = run.line.steps + 1
   const force = new Float64Array(count)
   const velocity = new Float64Array(count)
-  const { cells: n, delay, impedance } = block
-  const port = position === 0 ? block.left : block.right
-  const Y = 1 / (delay ? impedance[0] : port.impedance)
-  const sign = position === 0 ? 1 : -1
-  for (let k = 0; k < count; k++) {
-    if (delay) {
-      const fk = delay.line.right[k - position + n]
-      const gk = delay.line.left[k + position]
-      force[k] = fk + gk
-      velocity[k] = (gk - fk) * Y
-    } else {
-      force[k] = port.arriving[k] + port.leaving[k]
-      velocity[k] = sign * (port.arriving[k] - port.leaving[k]) * Y
+  const { cells: n, delay } = block
+  if (delay) {
+    const { right, left } = delay.line
+    const Y = 1 / block.impedance[0]
+    for (let k = 0; k < count; k++) {
+      const f = right[k - position + n]
+      const g = left[k + position]
+      force[k] = f + g
+      velocity[k] = (g - f) * Y
+    }
+  } else {
+    const { arriving, leaving, impedance } = position === 0 ? block.left : block.right
+    const Y = (position === 0 ? 1 : -1) / impedance
+    for (let k = 0; k < count; k++) {
+      force[k] = arriving[k] + leaving[k]
+      velocity[k] = (arriving[k] - leaving[k]) * Y
     }
   }
   return { force, velocity }

@@ -40,7 +40,7 @@ export class LiveBlock implements Block {
     readonly left: Port,
     readonly right: Port,
     readonly slot: number,
-    readonly delay: { line: DelayLine; envelope: DelayEnvelope } | null,
+    readonly delay: { line: DelayLine; tension: DelayEnvelope; compression: DelayEnvelope } | null,
   ) {
     this.kind = block.kind
     this.bar = block.bar
@@ -90,6 +90,8 @@ export interface WaveRun {
   line: Line
   blocks: LiveBlock[]
   nodes: LiveNode[]
+  /** The nodes' laws by the line's node; breaks count from -1 down. */
+  laws: Map<number, NodeLaw>
   /** Rigid bodies at the ends. */
   bodies: Body[]
   outside: { left: Outside; right: Outside; loads: Outside[] }

@@ -6,7 +6,7 @@ import type { Piece } from './piece'
 
 type Reader = Pick<
   MethodRun,
-  'sumBar' | 'readForce' | 'readExtremes' | 'addProbe' | 'readTrace' | 'readNode' | 'listFragments'
+  'sumBar' | 'makeForceReader' | 'readExtremes' | 'addProbe' | 'readTrace' | 'readNode' | 'listFragments'
 >
 
 /**
@@ -36,11 +36,14 @@ export function makeElementReader(line: Line, pieces: readonly Piece[], enter: (
         mass,
       }
     },
-    readForce(span, position, k) {
-      const { piece, slot } = seat(span, position)
-      if (slot === piece.first) return piece.left.force[k]
-      if (slot === piece.last) return piece.right.force[k]
-      return piece.stepper.keptForce(slot)
+    makeForceReader(places) {
+      const seats = places.map(({ span, position }) => seat(span, position))
+      return (k, row) =>
+        seats.forEach(({ piece, slot }, i) => {
+          if (slot === piece.first) row[i] = piece.left.force[k]
+          else if (slot === piece.last) row[i] = piece.right.force[k]
+          else row[i] = piece.stepper.keptForce(slot)
+        })
     },
     readExtremes(span) {
       enter()

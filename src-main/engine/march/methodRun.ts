@@ -65,6 +65,12 @@ export interface Fragment {
   momentum: number
 }
 
+/** A position of a span. */
+export interface SpanPlace {
+  span: number
+  position: number
+}
+
 /** A line under way by either method, as the records read it. */
 export interface MethodRun extends Method {
   line: Line
@@ -82,8 +88,11 @@ export interface MethodRun extends Method {
    * @param frame velocity of the falling frame [m/s]
    */
   sumBar(bar: number, k: number, frame: number): Stock
-  /** Force at a position of a span after the latest step k [N]. */
-  readForce(span: number, position: number, k: number): number
+  /**
+   * Makes a reader of the force at chosen positions after the latest step k [N]: it fills `row`, of the
+   * shape of `places`.
+   */
+  makeForceReader(places: readonly SpanPlace[]): (k: number, row: Float64Array) => void
   readExtremes(span: number): SpanExtremes
   /** Asks for the history of a position; call before the first step. */
   addProbe(span: number, position: number): void

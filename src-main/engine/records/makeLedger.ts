@@ -103,6 +103,7 @@ function takeStock(run: MethodRun, k: number, start: { momentum: number; mass: n
   for (const outside of [run.outside.left, run.outside.right, ...run.outside.loads]) {
     stock.work += outside.work
     stock.impulse += outside.impulse
+    stock.scale += Math.abs(outside.impulse)
     if (start !== null && rig.gravity !== 0) stock.work += rig.gravity * dt * outside.earlierImpulses
   }
   if (start !== null) stock.work += frame * start.momentum + (start.mass * frame * frame) / 2

@@ -21,6 +21,7 @@ export function makeRecords(run: MethodRun, full: boolean): Records {
   const { line } = run
   const steps = listSampleSteps(line.steps, full)
   const columns = listFieldColumns(line, full)
+  const readForces = run.makeForceReader(columns)
   const ledger = makeLedger(run, steps)
   const rows: Float64Array[] = []
   addProbes(run)
@@ -30,9 +31,8 @@ export function makeRecords(run: MethodRun, full: boolean): Records {
     record(index) {
       const k = steps[index]
       const row = new Float64Array(columns.length)
-      for (let i = 0; i < row.length; i++) {
-        row[i] = run.readForce(columns[i].span, columns[i].position, k) / columns[i].area
-      }
+      readForces(k, row)
+      for (let i = 0; i < row.length; i++) row[i] /= columns[i].area
       rows.push(row)
       return ledger.record(index)
     },

@@ -62,13 +62,16 @@ export function traceGauge(run: MethodRun, gauge: Gauge): PlaceTrace {
     rightgoing: new Float64Array(count),
     leftgoing: new Float64Array(count),
   }
+  const { force, velocity, rightgoing, leftgoing } = trace
+  const [F0, v0, F1, v1] = [here.force, here.velocity, there.force, there.velocity]
+  const fall = line.rig.gravity * line.dt
   for (let k = 0; k < count; k++) {
-    const F = here.force[k] + share * (there.force[k] - here.force[k])
-    const v = here.velocity[k] + share * (there.velocity[k] - here.velocity[k])
-    trace.force[k] = F
-    trace.velocity[k] = v + line.rig.gravity * line.dt * k
-    trace.rightgoing[k] = (F - Z * v) / 2
-    trace.leftgoing[k] = (F + Z * v) / 2
+    const F = F0[k] + share * (F1[k] - F0[k])
+    const v = v0[k] + share * (v1[k] - v0[k])
+    force[k] = F
+    velocity[k] = v + fall * k
+    rightgoing[k] = (F - Z * v) / 2
+    leftgoing[k] = (F + Z * v) / 2
   }
   return trace
 }
