@@ -51,6 +51,8 @@ export function makePathJoint(
     let ra = first
     let b = free - first
     let rb = residual(b)
+    // A level force leaves it at the root but for rounding, which may fall on the wrong side of zero.
+    if (rb * first >= 0) return b
     for (let turn = 0; turn < MOST_TURNS && rb !== 0 && b !== a; turn++) {
       const slope = (rb - ra) / (b - a)
       let next = b - rb / slope
