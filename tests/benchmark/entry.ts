@@ -1,2 +1,2 @@
-export { marchRig } from '../unit/engine/march'
+export { marchElements, marchRig } from '../unit/engine/march'
 export * from './rigs'

@@ -10,11 +10,15 @@ function makeBenchmarkRig(areas: (number | ((s: number) => number))[], cells: nu
   const push = (t: number) => (t < width ? 1000 * Math.sin((Math.PI * t) / width) : 0)
   const sections = areas.map((area) => makeSection(1 / areas.length, area))
   const timeStep = 1 / cells / 5000
-  return makeRig([makeBar('bar', sections)], { duration: steps * timeStep, timeStep }, {
-    leftEnd: { kind: 'force', pulse: makePulse(push) },
-    rightEnd: { kind: 'fixed' },
-    gauges: [1, 2, 3, 4].map((i) => ({ name: `G${i}`, bar: 0, at: i / 5, bridge: null })),
-  })
+  return makeRig(
+    [makeBar('bar', sections)],
+    { duration: steps * timeStep, timeStep },
+    {
+      leftEnd: { kind: 'force', pulse: makePulse(push) },
+      rightEnd: { kind: 'fixed' },
+      gauges: [1, 2, 3, 4].map((i) => ({ name: `G${i}`, bar: 0, at: i / 5, bridge: null })),
+    },
+  )
 }
 
 export function makeGradedRig(cells: number, steps: number): Rig {
@@ -24,6 +28,20 @@ export function makeGradedRig(cells: number, steps: number): Rig {
 export function makeSteppedRig(sections: number, cells: number, steps: number): Rig {
   const areas = Array.from({ length: sections }, (_, i) => 1e-4 * (1 + 0.25 * (i % 3)))
   return makeBenchmarkRig(areas, cells, steps)
+}
+
+/** The graded rig with a material that yields at a third of the pulse's stress. */
+export function makePlasticRig(cells: number, steps: number): Rig {
+  const rig = makeGradedRig(cells, steps)
+  for (const section of rig.bars[0].sections) {
+    section.material = { ...section.material, yield: 3e6, hardening: 20e9 }
+  }
+  return rig
+}
+
+/** A stepped line whose waves leave at a matched end, so that it decays to nothing. */
+export function makeDecayingSteppedRig(sections: number, cells: number, steps: number): Rig {
+  return { ...makeSteppedRig(sections, cells, steps), rightEnd: { kind: 'matched' } }
 }
 
 /** A line whose waves leave at a matched end, so that it decays to nothing. */

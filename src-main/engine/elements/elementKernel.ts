@@ -64,79 +64,41 @@ function makeElementKernel() {
     enter: makeHolder([v, F, K, Y, R, X, P, high, low, highStep, lowStep]),
 
     /**
-     * One step of a linear piece in one pass: `v += dt/M (F_j - F_(j-1))` at inner nodes, then
+     * One step of a piece in one pass: `v += dt/M (F_j - F_(j-1))` at inner nodes, then
      * `F += K dt (v_(j+1) - v_j)`, with the envelope of the nodal force `(F_(j-1) + F_j)/2`.
+     * Elastic-plastic elements return to `|F - X| = R`; isotropic hardening moves R, kinematic X.
+     *
+     * Both loops stand in one function that is too large for V8 to build into its callers: built in
+     * there, they would lose sight of where the arrays are.
      *
      * @param first slot of its first node
      * @param last slot of its last node
      * @param k the step
      * @param vFirst new velocity of the first node, found by its law [m/s]
      * @param vLast new velocity of the last node
+     * @param hardening how its plastic elements harden; null where all are elastic
      */
-    stepLinear(first: number, last: number, k: number, vFirst: number, vLast: number): void {
-      let before = F[first]
-      let vBefore = vFirst
-      v[first] = vFirst
-      for (let j = first + 1; j < last; j++) {
-        const here = F[j]
-        const vHere = v[j] + Y[j] * (here - before)
-        const node = 0.5 * (before + here)
-        v[j] = vHere
-        F[j - 1] = before + K[j - 1] * (vHere - vBefore)
-        before = here
-        vBefore = vHere
-        if (node > high[j]) {
-          high[j] = node * WIDENING
-          highStep[j] = k
-        } else if (node < low[j]) {
-          low[j] = node * WIDENING
-          lowStep[j] = k
-        }
-      }
-      v[last] = vLast
-      F[last - 1] = before + K[last - 1] * (vLast - vBefore)
-    },
-
-    /**
-     * One step of a piece with elastic-plastic elements: as `stepLinear`, with a radial return to
-     * `|F - X| = R`. Isotropic hardening moves R, kinematic hardening moves X.
-     *
-     * @param kinematic which of the two
-     */
-    stepPlastic(
+    step(
       first: number,
       last: number,
       k: number,
       vFirst: number,
       vLast: number,
-      kinematic: boolean,
+      hardening: 'isotropic' | 'kinematic' | null,
     ): void {
       let before = F[first]
       let vBefore = vFirst
-      work = 0
-      lead = 0
+      let trial = 0
       v[first] = vFirst
-      for (let j = first + 1; j <= last; j++) {
-        const i = j - 1
-        const here = F[j]
-        const vHere = j === last ? vLast : v[j] + Y[j] * (here - before)
-        let trial = before + K[i] * (vHere - vBefore)
-        const past = trial - X[i]
-        const over = (past < 0 ? -past : past) - R[i]
-        if (over > 0) {
-          // Plastic elongation, over / (K + P), in both of which dt is a factor that falls out.
-          const share = over / (K[i] + P[i])
-          const sign = past < 0 ? -1 : 1
-          trial -= sign * K[i] * share
-          if (kinematic) X[i] += sign * P[i] * share
-          else R[i] += P[i] * share
-          work += 0.5 * sign * share * (before + trial)
-          lead += 0.5 * sign * share * trial
-        }
-        v[j] = vHere
-        F[i] = trial
-        if (j < last) {
+      if (hardening === null) {
+        for (let j = first + 1; j < last; j++) {
+          const here = F[j]
+          const vHere = v[j] + Y[j] * (here - before)
           const node = 0.5 * (before + here)
+          v[j] = vHere
+          F[j - 1] = before + K[j - 1] * (vHere - vBefore)
+          before = here
+          vBefore = vHere
           if (node > high[j]) {
             high[j] = node * WIDENING
             highStep[j] = k
@@ -145,9 +107,48 @@ function makeElementKernel() {
             lowStep[j] = k
           }
         }
-        before = here
-        vBefore = vHere
+        trial = before + K[last - 1] * (vLast - vBefore)
+      } else {
+        const kinematic = hardening === 'kinematic'
+        let done = 0
+        let ahead = 0
+        for (let j = first + 1; j <= last; j++) {
+          const i = j - 1
+          const here = F[j]
+          const vHere = j === last ? vLast : v[j] + Y[j] * (here - before)
+          trial = before + K[i] * (vHere - vBefore)
+          const past = trial - X[i]
+          const over = (past < 0 ? -past : past) - R[i]
+          if (over > 0) {
+            // Plastic elongation over dt: dt is a factor of K and of P and falls out.
+            const share = over / (K[i] + P[i])
+            const sign = past < 0 ? -1 : 1
+            trial -= sign * K[i] * share
+            if (kinematic) X[i] += sign * P[i] * share
+            else R[i] += P[i] * share
+            done += 0.5 * sign * share * (before + trial)
+            ahead += 0.5 * sign * share * trial
+          }
+          v[j] = vHere
+          F[i] = trial
+          const node = 0.5 * (before + here)
+          before = here
+          vBefore = vHere
+          if (j === last) break
+          if (node > high[j]) {
+            high[j] = node * WIDENING
+            highStep[j] = k
+          } else if (node < low[j]) {
+            low[j] = node * WIDENING
+            lowStep[j] = k
+          }
+        }
+        trial = F[last - 1]
+        work = done
+        lead = ahead
       }
+      v[last] = vLast
+      F[last - 1] = trial
     },
   }
 }

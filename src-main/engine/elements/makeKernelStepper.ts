@@ -48,10 +48,8 @@ export function makeKernelStepper(piece: KernelPiece): Stepper {
     },
     finish({ k, vLeft, vRight, keep }) {
       if (keep) for (let i = first; i < last; i++) before[i - first] = F[i]
-      if (hardening === null) {
-        elementKernel.stepLinear(first, last, k, vLeft, vRight)
-      } else {
-        elementKernel.stepPlastic(first, last, k, vLeft, vRight, hardening === 'kinematic')
+      elementKernel.step(first, last, k, vLeft, vRight, hardening)
+      if (hardening !== null) {
         lost.add(dt * elementKernel.plasticWork)
         plasticLead = dt * elementKernel.plasticLead
       }

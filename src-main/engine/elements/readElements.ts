@@ -6,7 +6,15 @@ import type { Piece } from './piece'
 
 type Reader = Pick<
   MethodRun,
-  'sumBar' | 'makeForceReader' | 'readExtremes' | 'addProbe' | 'readTrace' | 'readNode' | 'listFragments'
+  | 'sumBar'
+  | 'makeForceReader'
+  | 'makeVelocityReader'
+  | 'readWaves'
+  | 'readExtremes'
+  | 'addProbe'
+  | 'readTrace'
+  | 'readNode'
+  | 'listFragments'
 >
 
 /**
@@ -45,6 +53,15 @@ export function makeElementReader(line: Line, pieces: readonly Piece[], enter: (
           else row[i] = piece.stepper.keptForce(slot)
         })
     },
+    makeVelocityReader(places) {
+      const slots = Int32Array.from(places, ({ span, position }) => seat(span, position).slot)
+      return (_, row) => {
+        enter()
+        const { v } = elementKernel
+        for (let i = 0; i < slots.length; i++) row[i] = v[slots[i]]
+      }
+    },
+    readWaves: () => null,
     readExtremes(span) {
       enter()
       const { high, low, highStep, lowStep } = elementKernel
