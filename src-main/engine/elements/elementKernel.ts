@@ -66,89 +66,90 @@ function makeElementKernel() {
     /**
      * One step of a piece in one pass: `v += dt/M (F_j - F_(j-1))` at inner nodes, then
      * `F += K dt (v_(j+1) - v_j)`, with the envelope of the nodal force `(F_(j-1) + F_j)/2`.
-     * Elastic-plastic elements return to `|F - X| = R`; isotropic hardening moves R, kinematic X.
      *
-     * Both loops stand in one function that is too large for V8 to build into its callers: built in
-     * there, they would lose sight of where the arrays are.
+     * Two nodes a turn: the loop is then too long for V8 to build into its callers, where it would
+     * lose sight of where the arrays are.
      *
      * @param first slot of its first node
      * @param last slot of its last node
      * @param k the step
      * @param vFirst new velocity of the first node, found by its law [m/s]
      * @param vLast new velocity of the last node
-     * @param hardening how its plastic elements harden; null where all are elastic
      */
-    step(
-      first: number,
-      last: number,
-      k: number,
-      vFirst: number,
-      vLast: number,
-      hardening: 'isotropic' | 'kinematic' | null,
-    ): void {
+    step(first: number, last: number, k: number, vFirst: number, vLast: number): void {
       let before = F[first]
       let vBefore = vFirst
-      let trial = 0
       v[first] = vFirst
-      if (hardening === null) {
-        for (let j = first + 1; j < last; j++) {
-          const here = F[j]
-          const vHere = v[j] + Y[j] * (here - before)
-          const node = 0.5 * (before + here)
-          v[j] = vHere
-          F[j - 1] = before + K[j - 1] * (vHere - vBefore)
-          before = here
-          vBefore = vHere
-          if (node > high[j]) {
-            high[j] = node * WIDENING
-            highStep[j] = k
-          } else if (node < low[j]) {
-            low[j] = node * WIDENING
-            lowStep[j] = k
-          }
+      let j = first + 1
+      for (; j + 1 < last; j += 2) {
+        const here = F[j]
+        const vHere = v[j] + Y[j] * (here - before)
+        const node = 0.5 * (before + here)
+        const i = j + 1
+        const next = F[i]
+        const vNext = v[i] + Y[i] * (next - here)
+        const nextNode = 0.5 * (here + next)
+        v[j] = vHere
+        v[i] = vNext
+        F[j - 1] = before + K[j - 1] * (vHere - vBefore)
+        F[j] = here + K[j] * (vNext - vHere)
+        before = next
+        vBefore = vNext
+        if (node > high[j]) {
+          high[j] = node * WIDENING
+          highStep[j] = k
+        } else if (node < low[j]) {
+          low[j] = node * WIDENING
+          lowStep[j] = k
         }
-        trial = before + K[last - 1] * (vLast - vBefore)
-      } else {
-        const kinematic = hardening === 'kinematic'
-        let done = 0
-        let ahead = 0
-        for (let j = first + 1; j <= last; j++) {
-          const i = j - 1
-          const here = F[j]
-          const vHere = j === last ? vLast : v[j] + Y[j] * (here - before)
-          trial = before + K[i] * (vHere - vBefore)
-          const past = trial - X[i]
-          const over = (past < 0 ? -past : past) - R[i]
-          if (over > 0) {
-            // Plastic elongation over dt: dt is a factor of K and of P and falls out.
-            const share = over / (K[i] + P[i])
-            const sign = past < 0 ? -1 : 1
-            trial -= sign * K[i] * share
-            if (kinematic) X[i] += sign * P[i] * share
-            else R[i] += P[i] * share
-            done += 0.5 * sign * share * (before + trial)
-            ahead += 0.5 * sign * share * trial
-          }
-          v[j] = vHere
-          F[i] = trial
-          const node = 0.5 * (before + here)
-          before = here
-          vBefore = vHere
-          if (j === last) break
-          if (node > high[j]) {
-            high[j] = node * WIDENING
-            highStep[j] = k
-          } else if (node < low[j]) {
-            low[j] = node * WIDENING
-            lowStep[j] = k
-          }
+        if (nextNode > high[i]) {
+          high[i] = nextNode * WIDENING
+          highStep[i] = k
+        } else if (nextNode < low[i]) {
+          low[i] = nextNode * WIDENING
+          lowStep[i] = k
         }
-        trial = F[last - 1]
-        work = done
-        lead = ahead
+      }
+      if (j < last) {
+        const here = F[j]
+        const vHere = v[j] + Y[j] * (here - before)
+        v[j] = vHere
+        F[j - 1] = before + K[j - 1] * (vHere - vBefore)
+        widen(j, 0.5 * (before + here), k)
+        before = here
+        vBefore = vHere
       }
       v[last] = vLast
-      F[last - 1] = trial
+      F[last - 1] = before + K[last - 1] * (vLast - vBefore)
+    },
+
+    /**
+     * Brings the elements of a piece back to their yield surface `|F - X| = R` after a step that took
+     * them as elastic. Isotropic hardening moves R, kinematic hardening moves X.
+     *
+     * @param kinematic which of the two
+     */
+    yieldElements(first: number, last: number, kinematic: boolean): void {
+      let done = 0
+      let ahead = 0
+      for (let i = first; i < last; i++) {
+        const trial = F[i]
+        const past = trial - X[i]
+        const over = (past < 0 ? -past : past) - R[i]
+        if (over > 0) {
+          // Plastic elongation over dt: dt is a factor of K and of P and falls out.
+          const share = past < 0 ? -over / (K[i] + P[i]) : over / (K[i] + P[i])
+          const force = trial - K[i] * share
+          const before = trial - K[i] * (v[i + 1] - v[i])
+          F[i] = force
+          if (kinematic) X[i] += P[i] * share
+          else R[i] += P[i] * (past < 0 ? -share : share)
+          done += 0.5 * share * (before + force)
+          ahead += 0.5 * share * force
+        }
+      }
+      work = done
+      lead = ahead
     },
   }
 }

@@ -48,8 +48,9 @@ export function makeKernelStepper(piece: KernelPiece): Stepper {
     },
     finish({ k, vLeft, vRight, keep }) {
       if (keep) for (let i = first; i < last; i++) before[i - first] = F[i]
-      elementKernel.step(first, last, k, vLeft, vRight, hardening)
+      elementKernel.step(first, last, k, vLeft, vRight)
       if (hardening !== null) {
+        elementKernel.yieldElements(first, last, hardening === 'kinematic')
         lost.add(dt * elementKernel.plasticWork)
         plasticLead = dt * elementKernel.plasticLead
       }
