@@ -27,7 +27,6 @@ export type FaultCode =
   | 'bore-too-wide'
   | 'record-path'
   | 'record-refused'
-  | 'not-computed-yet'
   | 'too-many-cells'
   | 'too-many-steps'
   | 'too-much-memory'

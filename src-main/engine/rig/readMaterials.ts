@@ -19,7 +19,7 @@ const FLATTEST = -0.01
 
 /**
  * Reads the materials of a rig.
- * @param reading gets `out-of-range` and the faults of quantities
+ * @param reading gets `out-of-range`, `missing` and the faults of quantities
  * @param raw materials by name
  * @returns those that are right, by name; null for a faulty one
  */
@@ -47,6 +47,9 @@ function readMaterial(reading: Reading, place: Place, name: string, form: Materi
   const hardening = optional(reading, place, 'hardening', form.hardening, 'not-negative')
   if (hardening !== null && modulus !== null && hardening >= modulus) {
     reading.faults.add([...place, 'hardening'], faultText.hardeningOverModulus())
+  }
+  if (hardening !== null && !Object.hasOwn(form, 'yield')) {
+    reading.faults.add([...place, 'yield'], faultText.hardeningWithoutYield())
   }
   const rest = {
     poisson,

@@ -1,7 +1,7 @@
 import type { Fault } from '../../contract/fault'
 import type { Bar, Rig, RunSettings } from '../../contract/rig'
-import { checkComputed } from './checkComputed'
 import { checkCounts } from './checkCounts'
+import { checkMethod } from './checkMethod'
 import { checkNames } from './checkNames'
 import { checkSize } from './checkSize'
 import { checkStudies } from './checkStudies'
@@ -77,7 +77,11 @@ function readForm(reading: Reading, form: Loose<RigForm>, method: RunSettings['m
     1,
   )
   checkStudies(reading, form.studies)
-  checkComputed(form, run, materials, reading.faults)
+  checkMethod(
+    run,
+    bars.map(({ bar }) => bar),
+    reading.faults,
+  )
   const whole = bars.map(({ bar }) => bar).filter((bar): bar is Bar => bar !== null)
   if (whole.length !== bars.length || run === null || duration === null) return null
   if (leftEnd === null || rightEnd === null || joints === null) return null

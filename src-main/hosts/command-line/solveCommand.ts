@@ -1,3 +1,4 @@
+import type { RunSettings } from '../../contract/rig'
 import { checkResultFolder } from '../../documents/save/checkResultFolder'
 import { makeResultFiles } from '../../documents/makeResultFiles'
 import { saveResultFolder } from '../../documents/save/saveResultFolder'
@@ -13,7 +14,8 @@ import { writeSolveSummary, writeSolveTables } from './writeSolveTables'
 
 export interface SolveOptions {
   out?: string
-  method?: string
+  /** Goes before the one in the file. */
+  method?: RunSettings['method']
   full?: boolean
   quiet?: boolean
 }
@@ -34,10 +36,7 @@ export async function solveCommand(
   const { out, method, full = false, quiet = false } = options
   const refuse = (path: string, message: string): number =>
     printRefusals(terminal, rigPath, [{ path, message }])
-  if (method === 'elements' || method === 'both') {
-    return refuse('--method', `the method of elements is not computed yet; use characteristics`)
-  }
-  const opened = openRig(rigPath, method === undefined ? undefined : 'characteristics')
+  const opened = openRig(rigPath, method)
   if ('faults' in opened) return printRefusals(terminal, rigPath, opened.faults)
   const tooLarge = full ? checkFullField(opened.rig) : null
   if (tooLarge !== null) return refuse('--full', tooLarge)

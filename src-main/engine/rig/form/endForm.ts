@@ -57,8 +57,8 @@ export const endForm = z
         loading: quantity('stiffness', 'Stiffness while the end goes in'),
         unloading: quantity(
           'stiffness',
-          'Stiffness while it comes back; as in loading where left out',
-        ).optional(),
+          'Stiffness while it comes back; at least that of loading, the same for an elastic ground',
+        ),
       },
       'A ground that the end goes into, compression only',
     ),

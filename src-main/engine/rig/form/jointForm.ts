@@ -5,9 +5,9 @@ const gap = quantity('length', 'Distance at the start; none where left out').opt
 
 const rate = {
   rateSensitivity: plainNumber(
-    'Growth of the stress with the natural logarithm of the strain rate',
+    'Exponent m: the loading stress is raised by (rate / referenceRate)^m, slower rates counting as the reference',
   ).optional(),
-  referenceRate: quantity('frequency', 'Strain rate at which the stress is as given').optional(),
+  referenceRate: quantity('frequency', 'Strain rate up to which the stress is as given').optional(),
 }
 
 const lawForm = z
@@ -41,7 +41,7 @@ const lawForm = z
         curve: pairs(
           plainNumber('Strain'),
           quantity('stress', 'Stress'),
-          'Rows of [strain, stress], strains rising',
+          'Rows of [strain, stress], strains rising, stresses not falling, compression positive',
         ),
         ...rate,
       },
@@ -62,9 +62,12 @@ export const jointForm = z
         curve: pairs(
           quantity('length', 'Closing'),
           quantity('force', 'Force, compression positive'),
-          'Loading curve as rows of [closing, force]; in place of a stiffness',
+          'Loading curve as rows of [closing, force] from ["0 mm", "0 N"], forces not falling; in place of a stiffness',
         ).optional(),
-        unloading: quantity('stiffness', 'Stiffness while it opens; as in loading where left out').optional(),
+        unloading: quantity(
+          'stiffness',
+          'Stiffness while it opens, at least the steepest of loading; as in loading where left out',
+        ).optional(),
         damping: quantity('damping', 'Damping').optional(),
         mass: quantity('mass', 'Mass of the cushion').optional(),
         gap,

@@ -79,13 +79,12 @@ export function readEnd(
     }
     case 'penetration': {
       const loading = readQuantity(reading, [...place, 'loading'], form.loading, 'stiffness', 'positive')
-      const unloading = readOptionalQuantity(
+      const unloading = readQuantity(
         reading,
         [...place, 'unloading'],
         form.unloading,
         'stiffness',
         'positive',
-        loading,
       )
       if (loading === null || unloading === null) return null
       if (unloading < loading) {

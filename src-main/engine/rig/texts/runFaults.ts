@@ -40,10 +40,6 @@ export const runFaults = {
   }),
   recordRefused: (why: string): FaultText => ({ code: 'record-refused', message: why }),
 
-  notComputedYet: (what: string): FaultText => ({
-    code: 'not-computed-yet',
-    message: `${what} is read and checked but not computed yet`,
-  }),
   tooManyCells: (cells: number, advice: string): FaultText => ({
     code: 'too-many-cells',
     message: `the line would need about ${Math.round(cells)} cells; at most ${LIMITS.cells} are computed: ${advice}`,

@@ -411,7 +411,12 @@ const quantities: BrokenRig[] = [
     undefined,
     /check the units/,
   ),
-  value('a tangent modulus over the modulus', 'materials.steel.hardening', '300 GPa', 'out-of-range'),
+  broken(
+    'a tangent modulus over the modulus',
+    changed('materials.steel.hardening', '300 GPa', [['materials.steel.yield', '800 MPa']]),
+    'out-of-range',
+    'materials.steel.hardening',
+  ),
 ]
 
 /** Formulas that would reach the machine, exhaust it or change how later ones are read. */
@@ -953,63 +958,208 @@ const pulses: BrokenRig[] = [
   ),
 ]
 
-const later: BrokenRig[] = [
+const cushion = (it: object) => ({ kind: 'cushion', ...it })
+const curve = (rows: unknown[][]) => ({ kind: 'cushion', curve: rows })
+const specimen = (rows: unknown[][]) => ({
+  kind: 'specimen',
+  length: '5 mm',
+  diameter: '8 mm',
+  law: { kind: 'curve', curve: rows },
+})
+
+const loading: BrokenRig[] = [
   value(
-    'an end that goes into the ground',
-    'rightEnd',
-    { kind: 'penetration', loading: '5 kN/mm' },
-    'not-computed-yet',
-    'rightEnd.kind',
-    /penetration/,
+    'a cushion that pulls across a gap',
+    'joints[0]',
+    cushion({ stiffness: '5 kN/mm', gap: '1 mm', tension: true }),
+    'conflict',
+    'joints[0].gap',
   ),
   value(
-    'a specimen',
+    'a cushion that pulls and unloads along another line',
     'joints[0]',
-    { kind: 'specimen', length: '5 mm', diameter: '8 mm', law: { kind: 'elastic', modulus: '3 GPa' } },
-    'not-computed-yet',
-    'joints[0].kind',
-  ),
-  value(
-    'a cushion with a curve',
-    'joints[0]',
-    {
-      kind: 'cushion',
-      curve: [
-        ['0 mm', '0 kN'],
-        ['1 mm', '5 kN'],
-      ],
-    },
-    'not-computed-yet',
-    'joints[0].curve',
-  ),
-  value(
-    'a cushion with an unloading stiffness',
-    'joints[0]',
-    { kind: 'cushion', stiffness: '5 kN/mm', unloading: '9 kN/mm' },
-    'not-computed-yet',
+    cushion({ stiffness: '5 kN/mm', unloading: '9 kN/mm', tension: true }),
+    'conflict',
     'joints[0].unloading',
   ),
   value(
-    'a cushion with a mass',
+    'a cushion that gives back more than it took',
     'joints[0]',
-    { kind: 'cushion', stiffness: '5 kN/mm', mass: '9 g' },
-    'not-computed-yet',
-    'joints[0].mass',
+    cushion({ stiffness: '5 kN/mm', unloading: '4 kN/mm' }),
+    'out-of-range',
+    'joints[0].unloading',
+    /4e\+?6|4000000 N\/m is softer .* 5000000 N\/m/,
   ),
   value(
-    'a run by elements',
-    'run.method',
-    'elements',
-    'not-computed-yet',
-    undefined,
-    /^a run by elements is read and checked but not computed yet$/,
+    'a cushion that unloads softer than the steepest part of its curve',
+    'joints[0]',
+    {
+      ...curve([
+        ['0 mm', '0 kN'],
+        ['1 mm', '1 kN'],
+        ['2 mm', '9 kN'],
+      ]),
+      unloading: '5 kN/mm',
+    },
+    'out-of-range',
+    'joints[0].unloading',
+    /8000000 N\/m/,
   ),
-  value('a run by both methods', 'run.method', 'both', 'not-computed-yet'),
-  value('a run with finite strain', 'run.finiteStrain', true, 'not-computed-yet'),
-  value('a run with lateral inertia', 'run.lateralInertia', true, 'not-computed-yet'),
-  value('a run with bulk viscosity', 'run.bulkViscosity', true, 'not-computed-yet'),
-  value('a run with spall', 'run.spall', true, 'not-computed-yet'),
-  value('a material with viscosity', 'materials.steel.viscosity', '500 Pa s', 'not-computed-yet'),
+  value(
+    'a cushion whose force falls',
+    'joints[0]',
+    curve([
+      ['0 mm', '0 kN'],
+      ['1 mm', '5 kN'],
+      ['2 mm', '4 kN'],
+    ]),
+    'out-of-range',
+    'joints[0].curve[2][1]',
+    /row 3/,
+  ),
+  value(
+    'a cushion whose curve carries nothing',
+    'joints[0]',
+    curve([
+      ['0 mm', '0 kN'],
+      ['1 mm', '0 kN'],
+    ]),
+    'out-of-range',
+    'joints[0].curve[1][1]',
+    /all forces/,
+  ),
+  value(
+    'a specimen whose stress falls',
+    'joints[0]',
+    specimen([
+      [0, '0 MPa'],
+      [0.1, '300 MPa'],
+      [0.2, '250 MPa'],
+    ]),
+    'out-of-range',
+    'joints[0].law.curve[2][1]',
+  ),
+  value(
+    'a specimen whose curve begins in tension',
+    'joints[0]',
+    specimen([
+      [-0.1, '0 MPa'],
+      [0.1, '300 MPa'],
+    ]),
+    'out-of-range',
+    'joints[0].law.curve[0][0]',
+  ),
+  value(
+    'a specimen without stress',
+    'joints[0]',
+    specimen([
+      [0, '0 MPa'],
+      [0.1, '0 MPa'],
+    ]),
+    'out-of-range',
+    'joints[0].law.curve[1][1]',
+  ),
+  value(
+    'a specimen with a falling power law',
+    'joints[0]',
+    {
+      kind: 'specimen',
+      length: '5 mm',
+      diameter: '8 mm',
+      law: { kind: 'power', strength: '1 GPa', exponent: -0.1 },
+    },
+    'out-of-range',
+    'joints[0].law.exponent',
+  ),
+  value(
+    'a ground whose unloading is not told',
+    'rightEnd',
+    { kind: 'penetration', loading: '5 kN/mm' },
+    'missing',
+    'rightEnd.unloading',
+  ),
+  value(
+    'a ground that gives back more than it took',
+    'rightEnd',
+    { kind: 'penetration', loading: '5 kN/mm', unloading: '4 kN/mm' },
+    'out-of-range',
+    'rightEnd.unloading',
+  ),
+]
+
+const ELEMENTS = { duration: '1.2 ms', cell: '2 mm', method: 'elements' }
+const LATERAL = { ...ELEMENTS, lateralInertia: true }
+
+const method: BrokenRig[] = [
+  ...(['finiteStrain', 'lateralInertia', 'bulkViscosity'] as const).map((key) =>
+    value(
+      `${key} by characteristics`,
+      `run.${key}`,
+      true,
+      'conflict',
+      undefined,
+      /elements alone.*make the method "elements" or "both", or leave this out/,
+    ),
+  ),
+  value(
+    'a viscous material by characteristics',
+    'materials.steel.viscosity',
+    '500 Pa s',
+    'conflict',
+    undefined,
+    /^viscosity is computed with elements alone/,
+  ),
+  ...(['elements', 'both'] as const).map((name) =>
+    broken(
+      `spall by ${name}`,
+      changed('materials.steel.spall', '1 GPa', [['run', { ...ELEMENTS, method: name, spall: true }]]),
+      'conflict',
+      'run.spall',
+      new RegExp(`elements cannot come apart.*"${name}"`),
+    ),
+  ),
+  value('spall without a strength', 'run.spall', true, 'conflict', undefined, /no material of the line/),
+  broken(
+    'lateral inertia without a Poisson ratio',
+    changed('materials.steel.poisson', undefined, [['run', LATERAL]]),
+    'missing',
+    'materials.steel.poisson',
+    /plain number/,
+  ),
+  broken(
+    'lateral inertia of a section that is not round',
+    changed('bars[1].sections[2]', section({ length: '500 mm', area: '500 mm^2' }), [['run', LATERAL]]),
+    'conflict',
+    'bars[1].sections[2].area',
+  ),
+  broken(
+    'lateral inertia with few cells',
+    changed('run', { ...LATERAL, cell: '10 mm' }),
+    'conflict',
+    'run.cell',
+    /at least 64 cells.*bar "striker" would have about 30: give a cell of at most 4\.6 mm/,
+  ),
+  broken(
+    'lateral inertia with few steps of time',
+    changed('run', { duration: '1.2 ms', timeStep: '2 us', method: 'both', lateralInertia: true }),
+    'conflict',
+    'run.timeStep',
+    /a time step of at most 0\.91 us/,
+  ),
+  broken(
+    'lateral inertia of a stubby bar',
+    changed('bars[0].sections[0].length', '50 mm', [['run', { ...LATERAL, cell: '0.5 mm' }]]),
+    'conflict',
+    'bars[0]',
+    /50 mm long.*at least 51\.2652 mm/,
+  ),
+  value(
+    'hardening without a yield stress',
+    'materials.steel.hardening',
+    '2 GPa',
+    'missing',
+    'materials.steel.yield',
+  ),
 ]
 
 const size: BrokenRig[] = [
@@ -1034,6 +1184,23 @@ const size: BrokenRig[] = [
     /GB/,
   ),
 ]
+
+size.push(
+  broken(
+    'elements whose viscosity asks for too fine a step',
+    changed('materials.steel.viscosity', '1 GPa s', [['run', { ...ELEMENTS, cell: '1 mm' }]]),
+    'too-many-steps',
+    'run.duration',
+  ),
+  broken(
+    'elements with one section far shorter than the cell',
+    changed('bars[1].sections[0]', { length: '1 um', diameter: '20 mm' }, [
+      ['run', { ...ELEMENTS, duration: '10 ms' }],
+    ]),
+    'too-many-steps',
+    'run.duration',
+  ),
+)
 
 const studies: BrokenRig[] = [
   value(
@@ -1079,7 +1246,8 @@ export const BROKEN_RIGS: BrokenRig[] = [
   ...geometry,
   ...joints,
   ...pulses,
-  ...later,
+  ...loading,
+  ...method,
   ...size,
   ...studies,
 ]

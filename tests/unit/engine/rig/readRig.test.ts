@@ -1,4 +1,6 @@
 import { describe, expect, it } from 'vitest'
+import { makeElementLine } from '../../../../src-main/engine/elements/makeElementLine'
+import { makeLine } from '../../../../src-main/engine/line/makeLine'
 import { estimateSize } from '../../../../src-main/engine/rig/estimateSize'
 import { readRig } from '../../../../src-main/engine/rig/readRig'
 import { EXAMPLE_RIG } from './exampleRig'
@@ -116,7 +118,7 @@ describe('readRig', () => {
       rightEnd: { kind: 'wall', gap: '-1 mm' },
       gauges: [{ name: 'G1', bar: 'stricker', at: '4 m' }],
       margins: { factorOfSafety: 'two' },
-      run: { duration: '1.2 ms', cell: '2 mm', method: 'elements' },
+      run: { duration: '1.2 ms', cell: '2 mm', finiteStrain: true },
       colour: 'red',
     })
     expect(faults.map(({ code, path }) => `${code} ${path}`)).toEqual([
@@ -134,14 +136,17 @@ describe('readRig', () => {
       'out-of-range rightEnd.gap',
       'unknown-bar gauges[0].bar',
       'formula-unknown-name margins.factorOfSafety',
-      'not-computed-yet run.method',
+      'conflict run.finiteStrain',
       'unknown-key colour',
     ])
   })
 
   it('lets a caller ask for another method than the file', () => {
-    const { faults } = readChanged({}, { method: 'elements' })
-    expect(faults.map(({ code, path }) => `${code} ${path}`)).toEqual(['not-computed-yet run.method'])
+    expect(readGood({}, { method: 'elements' }).run.method).toBe('elements')
+    const finite = { ...EXAMPLE_RIG.run, method: 'elements', finiteStrain: true }
+    expect(readGood({ run: finite }).run.finiteStrain).toBe(true)
+    const { faults } = readChanged({ run: finite }, { method: 'characteristics' })
+    expect(faults.map(({ code, path }) => `${code} ${path}`)).toEqual(['conflict run.finiteStrain'])
     const run = { ...EXAMPLE_RIG.run, method: 'elements' }
     expect(readGood({ run }, { method: 'characteristics' }).run.method).toBe('characteristics')
   })
@@ -217,5 +222,30 @@ describe('estimateSize', () => {
   it('gives every section at least one cell', () => {
     const { cells } = estimateSize(readGood({ run: { duration: '1 ms', cell: '5 m' } }))
     expect(cells).toBe(4)
+  })
+
+  it.each([
+    ['plain', {}, {}],
+    ['with viscosity', {}, { viscosity: '200 kPa s' }],
+    ['with finite strain', { finiteStrain: true }, {}],
+    ['with bulk viscosity', { bulkViscosity: true }, {}],
+  ])('estimates the steps of elements %s', (_name, more, of) => {
+    const run = { ...EXAMPLE_RIG.run, method: 'elements', ...more }
+    const rig = readGood({ run, materials: { steel: { ...EXAMPLE_RIG.materials.steel, ...of } } })
+    const line = makeElementLine(makeLine(rig))
+    // The cells that are cut may be up to 30 % finer than those wanted.
+    expect(line.steps / estimateSize(rig).steps).toBeGreaterThan(0.99)
+    expect(line.steps / estimateSize(rig).steps).toBeLessThan(1.45)
+  })
+
+  it('keeps room for every run of a solve', () => {
+    const memory = (run: object, of: object = {}) => {
+      const steel = { ...EXAMPLE_RIG.materials.steel, ...of }
+      return estimateSize(readGood({ run: { ...EXAMPLE_RIG.run, ...run }, materials: { steel } })).memory
+    }
+    const [waves, elements, both] = [{}, { method: 'elements' }, { method: 'both' }].map((run) => memory(run))
+    expect(both).toBeCloseTo(waves + elements, 0)
+    expect(memory({}, { fatigue: { strength: '1 GPa', exponent: -0.1 } })).toBeGreaterThan(2 * waves)
+    expect(memory({ spall: true }, { spall: '1 GPa' })).toBeGreaterThan(waves)
   })
 })

@@ -69,8 +69,6 @@ describe('usage', () => {
 
 describe('what is not computed yet is refused, and says so', () => {
   test.each([
-    [(at: string) => ['solve', at, '--method', 'elements'], /^--method: .*not computed yet.*\n$/],
-    [(at: string) => ['solve', at, '--method', 'both'], /^--method: .*not computed yet.*\n$/],
     [(at: string) => ['study', at], /^studies: .*not computed yet\n$/],
     [() => ['selfcheck'], /^selfcheck: .* not run .* yet\n$/],
   ])('%s', async (argv, message) => {

@@ -27,6 +27,10 @@ describe('ends', () => {
       { kind: 'support', stiffness: 5e6, damping: 0, mass: 0, joint: 'bonded', gap: 0 },
     ],
     [
+      { kind: 'penetration', loading: '5 kN/mm', unloading: '20 kN/mm' },
+      { kind: 'penetration', loading: 5e6, unloading: 20e6 },
+    ],
+    [
       { kind: 'support', damping: '5 N s/m', mass: '1 kg', gap: '1 mm' },
       { kind: 'support', stiffness: 0, damping: 5, mass: 1, joint: 'contact', gap: 0.001 },
     ],
@@ -53,7 +57,7 @@ describe('joints', () => {
   })
 
   it('read a linear cushion', () => {
-    const joint = { kind: 'cushion', stiffness: '5 kN/mm', damping: '10 N s/m', gap: '1 mm', tension: true }
+    const joint = { kind: 'cushion', stiffness: '5 kN/mm', damping: '10 N s/m', mass: '9 g', tension: true }
     expect(readGood({ joints: [joint] }).joints).toEqual([
       {
         kind: 'cushion',
@@ -61,9 +65,30 @@ describe('joints', () => {
         curve: null,
         unloading: null,
         damping: 10,
+        mass: 0.009,
+        gap: 0,
+        tension: true,
+      },
+    ])
+  })
+
+  it('read a cushion with a curve that unloads as steeply as it loads at most', () => {
+    const curve = [
+      ['0 mm', '0 kN'],
+      ['1 mm', '5 kN'],
+      ['3 mm', '5 kN'],
+    ]
+    const joint = { kind: 'cushion', curve, unloading: '5 kN/mm', gap: '1 mm' }
+    expect(readGood({ joints: [joint] }).joints).toEqual([
+      {
+        kind: 'cushion',
+        stiffness: null,
+        curve: { closing: [0, 0.001, 0.003], force: [0, 5000, 5000] },
+        unloading: 5e6,
+        damping: 0,
         mass: 0,
         gap: 0.001,
-        tension: true,
+        tension: false,
       },
     ])
   })
@@ -74,7 +99,6 @@ describe('specimens', () => {
     readChanged({ joints: [{ kind: 'specimen', length: '5 mm', law, ...more }] }).faults.map(
       ({ code, path }) => `${code} ${path}`,
     )
-  const LATER = 'not-computed-yet joints[0].kind'
 
   it.each([
     { kind: 'elastic', modulus: '3 GPa' },
@@ -89,8 +113,8 @@ describe('specimens', () => {
         ['0.2', '300 MPa'],
       ],
     },
-  ])('are read with the law %j, though not computed yet', (law) => {
-    expect(specimen(law)).toEqual([LATER])
+  ])('are read with the law %j', (law) => {
+    expect(specimen(law)).toEqual([])
   })
 
   it.each([
@@ -113,13 +137,13 @@ describe('specimens', () => {
       'out-of-range joints[0].law.curve[1][0]',
     ],
   ])('are refused with the law %j', (law, fault) => {
-    expect(specimen(law)).toEqual([LATER, fault])
+    expect(specimen(law)).toEqual([fault])
   })
 
   it('need either a diameter or an area', () => {
     const law = { kind: 'elastic', modulus: '3 GPa' }
-    expect(specimen(law, {})).toEqual([LATER, 'missing joints[0].diameter'])
-    expect(specimen(law, { area: '50 mm^2', diameter: '8 mm' })).toEqual(['conflict joints[0]', LATER])
+    expect(specimen(law, {})).toEqual(['missing joints[0].diameter'])
+    expect(specimen(law, { area: '50 mm^2', diameter: '8 mm' })).toEqual(['conflict joints[0]'])
   })
 })
 
