@@ -36,8 +36,9 @@ export function makePathJoint(
   function evaluateForce(to: number, duration: number): number {
     const rate = (to - law.closing) / duration
     const speed = hurry !== undefined && rate > 0 && law.loads(to) ? hurry(rate) : 1
-    // Where it cannot pull, the dashpot spans no open gap: only what closes beyond zero counts.
-    const squeeze = pulls ? to - law.closing : Math.max(0, to) - Math.max(0, law.closing)
+    // Where it cannot pull, the dashpot spans no open gap: only what closes beyond touching counts.
+    const { closing, rest } = law
+    const squeeze = pulls ? to - closing : Math.max(rest, to) - Math.max(rest, closing)
     const C = law.mean(to) * speed + (damping * squeeze) / duration
     return pulls ? C : Math.max(0, C)
   }

@@ -14,6 +14,8 @@ export interface PathLaw {
   readonly closing: number
   /** Mean force over a straight move from the closing it is at to another [N]. */
   mean(to: number): number
+  /** Closing at which it has just lost contact: zero, or the set that unloading has left [m]. */
+  readonly rest: number
   /** True where a move to that closing would run along the loading curve. */
   loads(to: number): boolean
   /** Brings it to another closing. */
@@ -74,6 +76,9 @@ export function makePathLaw(
     mean(to) {
       const move = to - at
       return move === 0 ? force(at) : (evaluateWork(to) - evaluateWork(at)) / move
+    },
+    get rest() {
+      return unloading === null || topForce === 0 ? 0 : top - topForce / unloading
     },
     loads: (to) => to > Math.max(0, unloading === null ? at : top),
     moveTo(to) {
