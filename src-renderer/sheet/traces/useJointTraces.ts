@@ -1,0 +1,126 @@
+import { onScopeDispose, shallowRef, watch, type ShallowRef } from 'vue'
+import type { PageResult } from '../../../src-main/contract/bridge'
+import { useBridge } from '../../stores/useBridge'
+import { useLayout } from '../../stores/useLayout'
+import { useRun } from '../../stores/useRun'
+import { useView } from '../../stores/useView'
+import { listSpells } from '../field/listSpells'
+import { makeLatest } from '../field/makeLatest'
+import type { JointTrace } from './makeContactSpec'
+import type { Stretch } from './pulseWindow'
+
+/** What a joint that can open carries in the time that is looked at. */
+export interface JointReading {
+  name: string
+  kind: string
+  trace: JointTrace
+  /** When it carries force [s]. */
+  contacts: Stretch[]
+}
+
+/** Share of a joint's largest force up to which it carries none. */
+const REST = 1e-6
+
+/** Width of the sliver of bar before a joint in which its force is read, as a share of the line. */
+const SLIVER = 1e-6
+
+/**
+ * Reads the force in every joint but bonded ones, one value for each pixel of the field's height: of those
+ * within the pixel the one of largest magnitude.
+ *
+ * @returns the readings of the last result, and what was read of earlier results
+ */
+export function useJointTraces(): {
+  readings: ShallowRef<JointReading[]>
+  earlier: WeakMap<PageResult, JointReading[]>
+} {
+  const [bridge, run, view, layout] = [useBridge(), useRun(), useView(), useLayout()]
+  const readings = shallowRef<JointReading[]>([])
+  const earlier = new WeakMap<PageResult, JointReading[]>()
+
+  async function fetch({ result, fromT, toT, rows }: Wanted): Promise<JointReading[]> {
+    const joints = run.line.value?.joints ?? []
+    const found = await Promise.all(
+      joints.map(async ({ kind, x }, i) => {
+        const joint = result.joints[i]
+        if (kind === 'bonded' || !joint) return []
+        const values = await bridge.readField({
+          slot: run.slot,
+          quantity: 'force',
+          fromX: x - SLIVER * view.lengthX.value,
+          toX: x,
+          fromT,
+          toT,
+          columns: 1,
+          rows,
+        })
+        return [
+          {
+            name: joint.name,
+            kind,
+            trace: readTrace(values, fromT, toT),
+            contacts: listSpells(values, REST * Math.abs(joint.peakForce), fromT, toT),
+          },
+        ]
+      }),
+    )
+    return found.flat()
+  }
+
+  const latest = makeLatest(
+    fetch,
+    (answer, { result }) => {
+      if (result !== run.result.value) return
+      readings.value = answer
+      earlier.set(result, answer)
+    },
+    () => (readings.value = []),
+  )
+  watch(
+    [run.result, view.fromT, view.toT, () => layout.field.height],
+    () => {
+      const result = run.result.value
+      if (!result) {
+        latest.drop()
+        readings.value = []
+        return
+      }
+      latest.ask({
+        result,
+        fromT: view.fromT.value,
+        toT: view.toT.value,
+        rows: Math.max(1, Math.round(layout.field.height)),
+      })
+    },
+    { immediate: true },
+  )
+  onScopeDispose(() => latest.drop())
+  return { readings, earlier }
+}
+
+interface Wanted {
+  result: PageResult
+  fromT: number
+  toT: number
+  rows: number
+}
+
+/**
+ * Makes a trace of the extremes in each row.
+ *
+ * @param values - smallest and largest in each row, the earliest first, shape (rows, 2)
+ * @param fromT - start of the first row [s]
+ * @param toT - end of the last row [s]
+ */
+export function readTrace(values: ArrayLike<number>, fromT: number, toT: number): JointTrace {
+  const rows = values.length / 2
+  const t = new Float64Array(rows)
+  const force = new Float64Array(rows)
+  for (let row = 0; row < rows; row++) {
+    const [low, high] = [values[2 * row], values[2 * row + 1]]
+    t[row] = fromT + ((toT - fromT) * (row + 0.5)) / rows
+    // Outside the run there is no number; a joint rests there.
+    force[row] = (high + low >= 0 ? high : low) || 0
+  }
+  return { t, force }
+}
