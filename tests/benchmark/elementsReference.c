@@ -3,7 +3,7 @@
  * reference.c, tiled for the cache. A block of nodes is taken through TILE steps at a time, skewed by
  * one node a step so that each block only needs what lies left of it (time skewing); everything is
  * recorded: envelope of the nodal force with its steps, traces at four gauges, energy and a row of the
- * field at 240 samples.
+ * field at 128 samples.
  *
  * usage: elementsReference MODE CELLS STEPS REPEATS   MODE linear | plastic
  */
@@ -13,7 +13,7 @@
 #include <string.h>
 #include <time.h>
 
-#define SAMPLES 240
+#define SAMPLES 128
 #define GAUGES 4
 #define BLOCK 512
 

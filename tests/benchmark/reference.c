@@ -1,7 +1,7 @@
 /*
  * Plain C reference: the same scheme as one fused loop over every cell and step, each cell with an
  * impedance of its own, everything recorded (force envelope with its steps, the traces at four
- * gauges, energy and a row of the field at 240 samples).
+ * gauges, energy and a row of the field at 128 samples).
  *
  * usage: reference MODE CELLS STEPS REPEATS   MODE graded: every cell differs; uniform: 8 sections
  * prints the seconds of each repeat on one line, then checksums
@@ -12,7 +12,7 @@
 #include <string.h>
 #include <time.h>
 
-#define SAMPLES 240
+#define SAMPLES 128
 #define GAUGES 4
 
 static double now(void) {

@@ -1,5 +1,4 @@
 import { breakStretches } from './breakStretches'
-import { flushDelayLine } from './delayLine'
 import { gradedKernel } from './gradedKernel'
 import type { LiveBlock, Stretch, WaveRun } from './waveRun'
 
@@ -26,11 +25,7 @@ export function advanceWaves(run: WaveRun, from: number, to: number): void {
     if (!run.line.rig.run.spall) for (; k + 2 <= to; k += 2) advancePair(run, graded, k)
     for (; k < to; k++) advanceOne(run, graded, k)
   }
-  for (const block of delays) {
-    flushDelayLine(block.delay!.line, from, to)
-    block.delay!.tension.advance(to)
-    block.delay!.compression.advance(to)
-  }
+  for (const block of delays) block.delay!.envelope.advance(to)
 }
 
 function closeNodes(run: WaveRun, from: number, to: number): void {

@@ -19,12 +19,3 @@ export function makeDelayLine(cells: number, steps: number): DelayLine {
     left: new Float64Array(cells + steps + 1),
   }
 }
-
-/** Sets waves that entered in steps from..to-1 and are under 1e-200 N to zero: subnormal numbers are slow. */
-export function flushDelayLine(line: DelayLine, from: number, to: number): void {
-  const { right, left, cells } = line
-  for (let i = from + cells; i < to + cells; i++) {
-    if (right[i] < 1e-200 && right[i] > -1e-200) right[i] = 0
-    if (left[i] < 1e-200 && left[i] > -1e-200) left[i] = 0
-  }
-}

@@ -2,6 +2,7 @@ import type { Line } from '../line/line'
 import type { Fragment, MethodRun, NodeTrace, SpanExtremes, SpanPlace, Stock } from '../march/methodRun'
 import { advanceWaves } from './advanceWaves'
 import { makeWaveRun } from './makeWaveRun'
+import { readVelocities } from './readVelocities'
 import { readExtremes, readForces, readTrace, sumBlock, sumCells } from './readWaves'
 import type { LiveBlock, WaveRun } from './waveRun'
 
@@ -26,7 +27,9 @@ export function makeWaveMethod(line: Line): MethodRun {
     outside: run.outside,
     advance: (from, to) => advanceWaves(run, from, to),
     sumBar: (bar, k, frame) => sumBar(run, bar, k, frame),
-    makeForceReader: (places) => makeForceReader(run, places),
+    makeForceReader: (places) => makePlaceReader(run, places, readForces),
+    makeVelocityReader: (places) => makePlaceReader(run, places, readVelocities),
+    readWaves: (span) => seat(span, 0).block.delay?.line ?? null,
     readExtremes: (span) => cutExtremes(run, span),
     addProbe(span, position) {
       const { block, at } = seat(span, position)
@@ -44,7 +47,11 @@ export function makeWaveMethod(line: Line): MethodRun {
 }
 
 /** Gathers the places block by block, so that each block is read in one loop. */
-function makeForceReader(run: WaveRun, places: readonly SpanPlace[]): (k: number, row: Float64Array) => void {
+function makePlaceReader(
+  run: WaveRun,
+  places: readonly SpanPlace[],
+  read: typeof readForces,
+): (k: number, row: Float64Array) => void {
   const parts: { block: LiveBlock; positions: number[]; at: number }[] = []
   places.forEach(({ span, position }, i) => {
     const block = run.blocks.find((one) => span >= one.firstSpan && span <= one.lastSpan)!
@@ -55,7 +62,7 @@ function makeForceReader(run: WaveRun, places: readonly SpanPlace[]): (k: number
   })
   const ready = parts.map((part) => ({ ...part, positions: Int32Array.from(part.positions) }))
   return (k, row) => {
-    for (const { block, positions, at } of ready) readForces(run, block, positions, k, row, at)
+    for (const { block, positions, at } of ready) read(run, block, positions, k, row, at)
   }
 }
 

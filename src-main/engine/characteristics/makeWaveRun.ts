@@ -48,8 +48,7 @@ function makeDelayBlock(line: Line, draft: Block): LiveBlock {
   const right = { impedance: Z, arriving: delay.right, leaving: delay.left, leavingOffset: n }
   return new LiveBlock(draft, left, right, -1, {
     line: delay,
-    tension: makeDelayEnvelope(delay, 1, line.steps + 1),
-    compression: makeDelayEnvelope(delay, -1, line.steps + 1),
+    envelope: makeDelayEnvelope(delay, line.steps + 1),
   })
 }
 

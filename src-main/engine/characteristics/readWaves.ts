@@ -139,7 +139,7 @@ function evaluateInner(block: LiveBlock, position: number): number {
 export function readExtremes(run: WaveRun, block: LiveBlock): SpanExtremes {
   const narrow = (values: Float64Array) => values.map((value) => value / WIDENING)
   if (block.delay) {
-    const { tension, compression } = block.delay
+    const { tension, compression } = block.delay.envelope
     return {
       high: narrow(tension.peak),
       low: narrow(compression.peak).map((value) => 0 - value),

@@ -40,7 +40,7 @@ export class LiveBlock implements Block {
     readonly left: Port,
     readonly right: Port,
     readonly slot: number,
-    readonly delay: { line: DelayLine; tension: DelayEnvelope; compression: DelayEnvelope } | null,
+    readonly delay: { line: DelayLine; envelope: DelayEnvelope } | null,
   ) {
     this.kind = block.kind
     this.bar = block.bar

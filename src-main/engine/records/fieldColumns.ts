@@ -3,7 +3,7 @@ import { evaluatePlace, type Line } from '../line/line'
 /** Columns of a field that is not asked for in full. */
 const COLUMNS = 240
 /** Rows of a field that is not asked for in full, and samples of the energy. */
-const ROWS = 240
+const ROWS = 128
 
 /** One column of the field: a position of a span. */
 export interface FieldColumn {
@@ -31,7 +31,7 @@ export function listFieldColumns(line: Line, full: boolean): FieldColumn[] {
 }
 
 /**
- * Chooses the steps after which energy and field are kept: every one, or about 240 evenly spaced,
+ * Chooses the steps after which energy and field are kept: every one, or about 128 evenly spaced,
  * always with the first and the last.
  */
 export function listSampleSteps(steps: number, full: boolean): Int32Array {

@@ -24,13 +24,14 @@ export function makeRecords(run: MethodRun, full: boolean): Records {
   const readForces = run.makeForceReader(columns)
   const ledger = makeLedger(run, steps)
   const rows: Float64Array[] = []
+  const values = new Float64Array(steps.length * columns.length)
   addProbes(run)
 
   return {
     steps,
     record(index) {
       const k = steps[index]
-      const row = new Float64Array(columns.length)
+      const row = values.subarray(index * columns.length, (index + 1) * columns.length)
       readForces(k, row)
       for (let i = 0; i < row.length; i++) row[i] /= columns[i].area
       rows.push(row)
@@ -47,12 +48,24 @@ export function makeRecords(run: MethodRun, full: boolean): Records {
         bars: line.bars.map((_, bar) => sumBar(run, bar)),
         jointLoss: line.bars.slice(0, -1).map((bar) => run.laws.get(bar.lastSpan + 1)!.dissipated()),
         ends: {
-          left: sumEnd(traceNode(run, 0)!, -1, line.dt),
-          right: sumEnd(traceNode(run, line.spans.length)!, 1, line.dt),
+          left: { ...sumEnd(traceNode(run, 0)!, -1, line.dt), bodyVelocity: readBody(run, 'left') },
+          right: {
+            ...sumEnd(traceNode(run, line.spans.length)!, 1, line.dt),
+            bodyVelocity: readBody(run, 'right'),
+          },
         },
       }
     },
   }
+}
+
+/** Velocity of the body at an end, which is the first or the last of the line's [m/s]; null without a mass. */
+function readBody(run: MethodRun, side: 'left' | 'right'): number | null {
+  const { rig, dt, steps } = run.line
+  const end = side === 'left' ? rig.leftEnd : rig.rightEnd
+  if (end.kind !== 'mass' && end.kind !== 'support') return null
+  const body = side === 'left' ? run.bodies[0] : run.bodies[run.bodies.length - 1]
+  return body.mass > 0 ? body.momentum() / body.mass + rig.gravity * dt * steps : null
 }
 
 function sumBar(run: MethodRun, bar: number): BarRecord {

@@ -85,4 +85,6 @@ export interface EndRecord {
   impulse: number
   /** Work of the surroundings on the bar [J]. */
   work: number
+  /** Velocity of the body that stands there, after the run, in the frame of the ground [m/s]; null without a mass. */
+  bodyVelocity: number | null
 }

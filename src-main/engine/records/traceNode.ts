@@ -22,7 +22,7 @@ export function traceNode(run: MethodRun, index: number): NodeTrace | null {
  * @param n +1 at the right end, -1 at the left end
  * @param dt [s]
  */
-export function sumEnd(trace: NodeTrace, n: 1 | -1, dt: number): EndRecord {
+export function sumEnd(trace: NodeTrace, n: 1 | -1, dt: number): Omit<EndRecord, 'bodyVelocity'> {
   let impulse = 0
   let work = 0
   trace.forceLeft.forEach((F, k) => {

@@ -1,6 +1,6 @@
 import type { Gauge } from '../../contract/rig'
 import type { Line } from '../line/line'
-import type { MethodRun } from '../march/methodRun'
+import type { MethodRun, SpanTrace } from '../march/methodRun'
 import type { PlaceTrace } from './record'
 
 /** Where a gauge lies: between positions `position` and `position + 1` of a span, `share` of the way. */
@@ -51,27 +51,29 @@ export function traceGauge(run: MethodRun, gauge: Gauge): PlaceTrace {
   const { material, shape } = span.source
   const area = shape.area(s)
   const Z = Math.sqrt(material.modulus * material.density) * area
-  const count = line.steps + 1
-  const trace: PlaceTrace = {
+  const trace = {
     x: line.bars[gauge.bar].from + gauge.at,
     area,
     impedance: Z,
     modulus: material.modulus,
-    force: new Float64Array(count),
-    velocity: new Float64Array(count),
-    rightgoing: new Float64Array(count),
-    leftgoing: new Float64Array(count),
   }
-  const { force, velocity, rightgoing, leftgoing } = trace
-  const [F0, v0, F1, v1] = [here.force, here.velocity, there.force, there.velocity]
-  const fall = line.rig.gravity * line.dt
+  const { force, velocity } = share > 0 ? blend(here, there, share) : here
+  const count = line.steps + 1
+  const rightgoing = new Float64Array(count)
+  const leftgoing = new Float64Array(count)
   for (let k = 0; k < count; k++) {
-    const F = F0[k] + share * (F1[k] - F0[k])
-    const v = v0[k] + share * (v1[k] - v0[k])
-    force[k] = F
-    velocity[k] = v + fall * k
-    rightgoing[k] = (F - Z * v) / 2
-    leftgoing[k] = (F + Z * v) / 2
+    const F = force[k]
+    const Zv = Z * velocity[k]
+    rightgoing[k] = (F - Zv) / 2
+    leftgoing[k] = (F + Zv) / 2
   }
-  return trace
+  const fall = line.rig.gravity * line.dt
+  const ground = fall === 0 ? velocity : velocity.map((v, k) => v + fall * k)
+  return { ...trace, force, velocity: ground, rightgoing, leftgoing }
+}
+
+/** The trace a share of the way between two positions. */
+function blend(here: SpanTrace, there: SpanTrace, share: number): SpanTrace {
+  const mix = (from: Float64Array, to: Float64Array) => from.map((a, k) => a + share * (to[k] - a))
+  return { force: mix(here.force, there.force), velocity: mix(here.velocity, there.velocity) }
 }
