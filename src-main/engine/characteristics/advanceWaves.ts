@@ -2,8 +2,8 @@ import { breakStretches } from './breakStretches'
 import { gradedKernel } from './gradedKernel'
 import type { LiveBlock, Stretch, WaveRun } from './waveRun'
 
-/** Steps between two sweeps for subnormal numbers in graded blocks. */
-const FLUSH_EVERY = 64
+/** Steps between two sweeps for subnormal numbers. */
+const SWEEP_EVERY = 64
 
 /**
  * Marches steps from..to-1 in place: the laws at the nodes, then scatter and shift inside blocks.
@@ -16,16 +16,22 @@ const FLUSH_EVERY = 64
 export function advanceWaves(run: WaveRun, from: number, to: number): void {
   gradedKernel.enter(run.graded)
   const delays = run.blocks.filter((block) => block.delay !== null)
-  if (run.stretches.length === 0) {
-    const stride = Math.min(...delays.map((block) => block.cells))
-    for (let k = from; k < to; k += stride) closeNodes(run, k, Math.min(to, k + stride))
-  } else {
-    const graded = run.blocks.filter((block) => block.delay === null)
-    let k = from
-    if (!run.line.rig.run.spall) for (; k + 2 <= to; k += 2) advancePair(run, graded, k)
-    for (; k < to; k++) advanceOne(run, graded, k)
+  const graded = run.blocks.filter((block) => block.delay === null)
+  const stride = Math.min(...delays.map((block) => block.cells))
+  for (let start = from; start < to; start += SWEEP_EVERY) {
+    const end = Math.min(to, start + SWEEP_EVERY)
+    if (graded.length > 0) advanceGraded(run, graded, start, end)
+    else for (let k = start; k < end; k += stride) closeNodes(run, k, Math.min(end, k + stride))
+    for (const block of delays) block.delay!.envelope.takeIn(end)
   }
   for (const block of delays) block.delay!.envelope.advance(to)
+}
+
+function advanceGraded(run: WaveRun, graded: readonly LiveBlock[], from: number, to: number): void {
+  for (const { slot, cells } of graded) gradedKernel.flush(slot, slot + cells - 1)
+  let k = from
+  if (!run.line.rig.run.spall) for (; k + 2 <= to; k += 2) advancePair(run, graded, k)
+  for (; k < to; k++) advanceOne(run, graded, k)
 }
 
 function closeNodes(run: WaveRun, from: number, to: number): void {
@@ -70,9 +76,9 @@ function stepOne(stretch: Stretch, k: number): void {
   receive(stretch, k)
 }
 
-/** Notes what a block's probes see at step k before it is made, and sweeps its tiny waves out. */
+/** Notes what a block's probes see at step k before it is made. */
 function beginStep(block: LiveBlock, k: number): void {
-  const { slot, cells, probes, impedance } = block
+  const { slot, probes, impedance } = block
   const { f, g } = gradedKernel
   for (let i = 0; i < probes.length; i++) {
     const { position, force, velocity } = probes[i]
@@ -82,7 +88,6 @@ function beginStep(block: LiveBlock, k: number): void {
     force[k] = 2 * gIn + impedance[position] * Y * (fIn - gIn)
     velocity[k] = Y * (gIn - fIn)
   }
-  if (k % FLUSH_EVERY < 2) gradedKernel.flush(slot, slot + cells - 1)
 }
 
 /**

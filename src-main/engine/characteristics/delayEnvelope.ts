@@ -11,6 +11,8 @@ export interface DelayEnvelope {
   tension: Peaks
   /** Counted positive. */
   compression: Peaks
+  /** Bounds the whole rows of 16 steps before `to`, sweeping tiny waves out. */
+  takeIn(to: number): void
   /** Takes in all steps before `to`; those of an unfinished window wait unless `to` is the end of the run. */
   advance(to: number): void
 }
@@ -62,11 +64,16 @@ export function makeDelayEnvelope(line: DelayLine, end: number): DelayEnvelope {
     return { peaks, scanColumn }
   }
 
+  function takeIn(to: number): void {
+    while (bounded < rows && (to === end || (bounded + 1) * TILE <= to)) bounds.addRow(bounded++)
+  }
+
   return {
+    takeIn,
     tension: tension.peaks,
     compression: compression.peaks,
     advance(to) {
-      while (bounded < rows && (to === end || (bounded + 1) * TILE <= to)) bounds.addRow(bounded++)
+      takeIn(to)
       while (nextRow < rows && (to === end || (nextRow + WINDOW) * TILE <= to)) {
         const until = Math.min(nextRow + WINDOW, rows)
         for (let tile = 0; tile < tiles; tile++) {
