@@ -1,4 +1,4 @@
-import { reactive } from 'vue'
+import { reactive, watch, type Ref } from 'vue'
 
 /** A stretch of the sheet from its top [px]. */
 export interface Stretch {
@@ -45,10 +45,15 @@ const HUGE = 2800
  *
  * @param windowWidth - [px]
  * @param windowHeight - [px]
- * @param drawer - width of the drawer, 0 where none is open [px]; it narrows the field
+ * @param wants - width of the drawer, which narrows the field, and height of the fields of a part, which
+ *   lower it; 0 where there is none [px]
  * @returns the measures
  */
-export function evaluateLayout(windowWidth: number, windowHeight: number, drawer = 0): Layout {
+export function evaluateLayout(
+  windowWidth: number,
+  windowHeight: number,
+  { drawer = 0, editor = 0 }: { drawer?: number; editor?: number } = {},
+): Layout {
   const width = Math.max(windowWidth, LEAST_WIDTH)
   const height = Math.max(windowHeight, LEAST_HEIGHT)
   const wide = width >= WIDE
@@ -69,7 +74,7 @@ export function evaluateLayout(windowWidth: number, windowHeight: number, drawer
   const heights = {
     verbs: grid(32),
     line: grid(120 + Math.min(80, 0.14 * tall)),
-    strip: grid(60 + Math.min(60, 0.06 * tall)),
+    strip: Math.max(grid(60 + Math.min(60, 0.06 * tall)), Math.min(editor, Math.floor(0.42 * height))),
     ruler: grid(20),
     peaks: grid(164 + 0.18 * tall),
     notice: grid(24),
@@ -108,15 +113,20 @@ export function evaluateLayout(windowWidth: number, windowHeight: number, drawer
 }
 
 /**
- * Makes the measures that follow the window.
+ * Makes the measures that follow the window and what is open in it.
  *
  * @param page - the page's window
+ * @param editor - height of the fields of a part [px]
  * @returns one reactive object
  */
-export function makeLayout(page: Pick<Window, 'innerWidth' | 'innerHeight' | 'addEventListener'>): Layout {
-  const layout = reactive(evaluateLayout(page.innerWidth, page.innerHeight))
-  page.addEventListener('resize', () =>
-    Object.assign(layout, evaluateLayout(page.innerWidth, page.innerHeight)),
-  )
+export function makeLayout(
+  page: Pick<Window, 'innerWidth' | 'innerHeight' | 'addEventListener'>,
+  editor: Ref<number>,
+): Layout {
+  const evaluate = (): Layout => evaluateLayout(page.innerWidth, page.innerHeight, { editor: editor.value })
+  const layout = reactive(evaluate())
+  const follow = (): unknown => Object.assign(layout, evaluate())
+  page.addEventListener('resize', follow)
+  watch(editor, follow, { flush: 'sync' })
   return layout
 }

@@ -4,13 +4,15 @@ import { readAt } from './document/readAt'
 
 /** The part that is being edited. */
 export interface Selection {
-  /** Such as `bars[0].sections[1]`, `joints[0]`, `leftEnd`, `gauges[0]`, `run`; null for none. */
+  /** Such as `bars[0].sections[1]`, `joints[0]`, `leftEnd`, `gauges[0]`, `run`, `rig`; null for none. */
   path: Ref<string | null>
+  /** Height that the fields of the part take in place of the strip [px]; 0 where none are shown. */
+  editorHeight: Ref<number>
   select(path: string | null): void
 }
 
 /** Parts that may be edited though the document does not hold them yet. */
-const ALWAYS_THERE = /^(leftEnd|rightEnd|run|margins|materials|variables|title|joints\[\d+\])$/
+const ALWAYS_THERE = /^(leftEnd|rightEnd|run|rig|materials|variables|joints\[\d+\])$/
 
 /**
  * Makes the store of the selection.
@@ -27,6 +29,7 @@ export function makeSelection(rig: Rig): Selection {
   })
   return {
     path,
+    editorHeight: ref(0),
     select(next) {
       if (next !== path.value) rig.seal()
       path.value = next

@@ -1,5 +1,8 @@
 import type { Bridge } from '../../src-main/contract/bridge'
 import { makeCursor, type Cursor } from './makeCursor'
+import { makeBrowserFiles } from './files/makeBrowserFiles'
+import { makeHostFiles } from './files/makeHostFiles'
+import { makeDocuments, type Documents } from './makeDocuments'
 import { makeLayout, type Layout } from './makeLayout'
 import { makeRig, type Rig } from './makeRig'
 import { makeRun, type Run } from './makeRun'
@@ -15,6 +18,7 @@ export interface Stores {
   cursor: Cursor
   selection: Selection
   layout: Layout
+  documents: Documents
 }
 
 /**
@@ -25,10 +29,14 @@ export interface Stores {
  * @returns the stores, to be provided once
  */
 export function makeStores(bridge: Bridge, page: Window): Stores {
-  const layout = makeLayout(page)
   const rig = makeRig(bridge)
+  const selection = makeSelection(rig)
+  const layout = makeLayout(page, selection.editorHeight)
   const run = makeRun(bridge, rig)
   const view = makeView(run)
   const cursor = makeCursor(run, view, () => ({ width: layout.fieldWidth, height: layout.field.height }))
-  return { bridge, rig, run, view, cursor, selection: makeSelection(rig), layout }
+  const host = bridge.files?.()
+  const files = host ? makeHostFiles(host) : makeBrowserFiles(page)
+  const documents = makeDocuments(bridge, rig, files, page)
+  return { bridge, rig, run, view, cursor, selection, layout, documents }
 }

@@ -10,4 +10,5 @@ export const STORE_KEYS: { [Name in keyof Stores]: InjectionKey<Stores[Name]> } 
   cursor: Symbol('cursor'),
   selection: Symbol('selection'),
   layout: Symbol('layout'),
+  documents: Symbol('documents'),
 }
