@@ -89,12 +89,15 @@ export function makeElementMethod(line: Line): MethodRun {
 
 /** Prepares a step of a piece, noting what its watched and loaded nodes have before it. */
 function begin(piece: Piece, k: number, beat: Beat): void {
-  const { first, stepper, probes, loads } = piece
+  const { first, stepper, faces, probes, loads } = piece
   const share = beat.duration(k) / beat.dt
   for (const load of loads) load.before = elementKernel.v[load.slot]
   for (const probe of probes) probe.velocity[k] = elementKernel.v[first + probe.position]
   stepper.prepare(k, share)
-  for (const probe of probes) probe.force[k] = stepper.nodeForce(first + probe.position)
+  for (const { slot, take } of faces) take(k, stepper.elementForce(slot - 1), stepper.elementForce(slot))
+  for (const probe of probes) {
+    probe.force[k] = probe.face === null ? stepper.nodeForce(first + probe.position) : probe.face.force
+  }
 }
 
 /** Finishes a step of a piece and books what it did at watched and loaded nodes. */

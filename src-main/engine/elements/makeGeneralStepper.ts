@@ -153,6 +153,7 @@ export function makeGeneralStepper(piece: GeneralPiece): Stepper {
       if (k === 0) lost.add(evaluateStartLoss(before, old, v, first, dt))
       takeExtremes(k)
     },
+    elementForce: (slot) => total[slot - first],
     nodeForce: (slot) => nodeForce(slot - first),
     keptForce: (slot) => nodeForce(slot - first),
     kinetic: (frame) => solver.kinetic(v, first, frame),

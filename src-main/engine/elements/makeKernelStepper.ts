@@ -56,6 +56,7 @@ export function makeKernelStepper(piece: KernelPiece): Stepper {
       }
       if (k === 0) lost.add(evaluateStartLoss(start.force, start.v, v, first, dt))
     },
+    elementForce: (slot) => F[slot],
     nodeForce: (slot) => (F[slot - 1] + F[slot]) / 2,
     keptForce: (slot) => (before[slot - first - 1] + before[slot - first]) / 2,
     kinetic(frame) {

@@ -7,6 +7,7 @@ import { makeElementMaterial } from './elementMaterial'
 import { makeEndNode } from './makeEndNode'
 import { makeGeneralStepper } from './makeGeneralStepper'
 import { makeKernelStepper } from './makeKernelStepper'
+import { makeStepFaces } from './makeStepFaces'
 import type { NodeLoad, Piece, Stepper } from './piece'
 
 /** Elements of one bar, shape (elements) each. */
@@ -55,6 +56,9 @@ export function makePieces(
       stepper,
       left: makeEndNode(start, stepper, 'left', beat, line.steps),
       right: makeEndNode(start + count, stepper, 'right', beat, line.steps),
+      faces: spanStart
+        .slice(1, -1)
+        .map((j) => makeStepFaces(start + j, elementMass[j - 1] / 2, elementMass[j] / 2, loads)),
       probes: [],
       loads,
     }

@@ -1,10 +1,12 @@
 import type { Outside } from '../laws/outside'
 import type { Side } from '../laws/side'
 
-/** The history of an inner node, shape (steps + 1) each. */
+/** The history of an inner node, or of one face of a node where sections meet, shape (steps + 1) each. */
 export interface NodeProbe {
   /** Node of the piece. */
   position: number
+  /** Null for a node inside a section. */
+  face: FaceForce | null
   /** [N] */
   force: Float64Array
   /** Working velocity in the falling frame [m/s] */
@@ -19,6 +21,24 @@ export interface NodeLoad {
   outside: Outside
   /** Velocity of the node before the step under way [m/s]. */
   before: number
+}
+
+/** Force on one face of a node at the latest step, and its extremes so far [N]. */
+export interface FaceForce {
+  force: number
+  high: number
+  low: number
+  highStep: number
+  lowStep: number
+}
+
+/** An inner node where sections meet, or where a load acts. */
+export interface StepFaces {
+  slot: number
+  left: FaceForce
+  right: FaceForce
+  /** Takes the forces of the elements before and after the node at step k [N]. */
+  take(k: number, before: number, after: number): void
 }
 
 /** One end node: its side for the law beside it, what the law found, and its history. */
@@ -58,7 +78,9 @@ export interface Stepper {
   readonly admittanceRight: number
   /** Moves nodes and elements on. */
   finish(step: PieceStep): void
-  /** Force at an inner slot at the step under way, between `prepare` and `finish` [N]. */
+  /** Force of the element at a slot at the step under way, between `prepare` and `finish` [N]. */
+  elementForce(slot: number): number
+  /** Force at a node inside a section at that step, the mean of the elements beside it [N]. */
   nodeForce(slot: number): number
   /** The same after a `finish` that was asked to keep it. */
   keptForce(slot: number): number
@@ -87,6 +109,8 @@ export interface Piece {
   stepper: Stepper
   left: EndNode
   right: EndNode
+  /** At each face between its spans. */
+  faces: StepFaces[]
   probes: NodeProbe[]
   loads: NodeLoad[]
 }

@@ -2,7 +2,7 @@ import type { Line } from '../line/line'
 import type { MethodRun, SpanTrace } from '../march/methodRun'
 import { WIDENING } from '../march/widening'
 import { elementKernel } from './elementKernel'
-import type { Piece } from './piece'
+import type { FaceForce, Piece } from './piece'
 
 type Reader = Pick<
   MethodRun,
@@ -25,11 +25,16 @@ type Reader = Pick<
 export function makeElementReader(line: Line, pieces: readonly Piece[], enter: () => void): Reader {
   const lastSpan = line.spans.length
 
-  /** Where a position of a span lies: its piece, its node and its slot. */
+  /** Where a position of a span lies: its piece, its node and its slot, and its face where spans meet. */
   function seat(span: number, position: number) {
-    const piece = pieces[line.spans[span].bar]
-    const node = piece.spanStart[span - piece.firstSpan] + position
-    return { piece, node, slot: piece.first + node }
+    const { bar, cells } = line.spans[span]
+    const piece = pieces[bar]
+    const index = span - piece.firstSpan
+    const node = piece.spanStart[index] + position
+    let face: FaceForce | null = null
+    if (position === 0 && index > 0) face = piece.faces[index - 1].right
+    else if (position === cells && index < piece.faces.length) face = piece.faces[index].left
+    return { piece, node, slot: piece.first + node, face }
   }
 
   return {
@@ -47,8 +52,9 @@ export function makeElementReader(line: Line, pieces: readonly Piece[], enter: (
     makeForceReader(places) {
       const seats = places.map(({ span, position }) => seat(span, position))
       return (k, row) =>
-        seats.forEach(({ piece, slot }, i) => {
-          if (slot === piece.first) row[i] = piece.left.force[k]
+        seats.forEach(({ piece, slot, face }, i) => {
+          if (face !== null) row[i] = face.force
+          else if (slot === piece.first) row[i] = piece.left.force[k]
           else if (slot === piece.last) row[i] = piece.right.force[k]
           else row[i] = piece.stepper.keptForce(slot)
         })
@@ -64,28 +70,36 @@ export function makeElementReader(line: Line, pieces: readonly Piece[], enter: (
     readWaves: () => null,
     readExtremes(span) {
       enter()
-      const { high, low, highStep, lowStep } = elementKernel
+      const { cells } = line.spans[span]
       const from = seat(span, 0).slot
-      const to = from + line.spans[span].cells + 1
-      return {
-        high: high.slice(from, to).map((value) => value / WIDENING),
-        low: low.slice(from, to).map((value) => value / WIDENING),
-        highStep: highStep.slice(from, to),
-        lowStep: lowStep.slice(from, to),
+      const high = elementKernel.high.slice(from, from + cells + 1)
+      const low = elementKernel.low.slice(from, from + cells + 1)
+      const highStep = elementKernel.highStep.slice(from, from + cells + 1)
+      const lowStep = elementKernel.lowStep.slice(from, from + cells + 1)
+      for (const p of [0, cells]) {
+        const { face } = seat(span, p)
+        if (face === null) continue
+        high[p] = face.high
+        low[p] = face.low
+        highStep[p] = face.highStep
+        lowStep[p] = face.lowStep
       }
+      const narrow = (value: number) => value / WIDENING
+      return { high: high.map(narrow), low: low.map(narrow), highStep, lowStep }
     },
     addProbe(span, position) {
-      const { piece, node } = seat(span, position)
+      const { piece, node, face } = seat(span, position)
       const inner = node > 0 && node < piece.last - piece.first
-      if (!inner || piece.probes.some((probe) => probe.position === node)) return
+      if (!inner || piece.probes.some((probe) => probe.position === node && probe.face === face)) return
       const count = line.steps + 1
-      piece.probes.push({ position: node, force: new Float64Array(count), velocity: new Float64Array(count) })
+      const [force, velocity] = [new Float64Array(count), new Float64Array(count)]
+      piece.probes.push({ position: node, face, force, velocity })
     },
     readTrace(span, position): SpanTrace {
-      const { piece, node } = seat(span, position)
+      const { piece, node, face } = seat(span, position)
       if (node === 0) return piece.left
       if (node === piece.last - piece.first) return piece.right
-      return piece.probes.find((probe) => probe.position === node)!
+      return piece.probes.find((probe) => probe.position === node && probe.face === face)!
     },
     readNode(node) {
       const joint = line.bars.some((bar) => bar.lastSpan + 1 === node)
