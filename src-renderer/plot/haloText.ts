@@ -10,7 +10,7 @@ export interface TextStyle {
 }
 
 /** Width of the halo around each stroke [px]. */
-const HALO = 3
+const HALO = 2
 
 /**
  * Writes a word with a halo.

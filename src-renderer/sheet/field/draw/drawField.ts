@@ -1,0 +1,206 @@
+import { drawHaloText } from '../../../plot/haloText'
+import { placeLabels, type Box } from '../../../plot/placeLabels'
+import { drawFronts } from './drawFronts'
+import { CHAIN, DOTS, drawLevels, drawUprights } from './drawLines'
+import type { FieldModel } from './fieldModel'
+import type { FieldScales } from './fieldScales'
+import { listFrontLabels, listFrontLines } from './listFrontLabels'
+
+export const FONT = '"IBM Plex Sans Condensed", sans-serif'
+
+/** Half the width of the bar that stands for a contact that carries force [px]. */
+const CONTACT = 2.5
+
+/**
+ * Draws what stands over the field's picture: grid, sections, signs, fronts with their numbers, contacts,
+ * gauges, the governing ring with its chain lines, and the key.
+ *
+ * @param context - drawn into; one unit is one pixel of the page
+ * @param model - what is shown
+ * @param scales - where
+ */
+export function drawField(context: CanvasRenderingContext2D, model: FieldModel, scales: FieldScales): void {
+  const { palette, stale, line } = model
+  const { width, height, x, t } = scales
+  const ink = stale ? palette.stale : palette.ink
+  const upright = (places: number[], style: Parameters<typeof drawUprights>[4]): void =>
+    drawUprights(
+      context,
+      places.map(x.at).filter((place) => place > -1 && place < width + 1),
+      0,
+      height,
+      style,
+    )
+
+  const grid = { colour: palette.ink, alpha: palette.theme === 'dark' ? 0.12 : 0.08 }
+  upright(
+    model.xTicks.major.map((value) => value * model.xUnit),
+    grid,
+  )
+  drawLevels(
+    context,
+    model.tTicks.major.map((value) => t.at(value * model.tUnit)),
+    0,
+    width,
+    grid,
+  )
+
+  drawSigns(context, model, scales)
+  if (line) {
+    const faces = line.bars.flatMap(({ sections }) => sections.slice(1).map(({ from }) => from))
+    upright(faces, { colour: ink, width: 0.75, alpha: 0.35 })
+    upright(
+      line.joints.map((joint) => joint.x),
+      { colour: ink },
+    )
+    upright(
+      line.gauges.map((gauge) => gauge.x),
+      { colour: ink, dash: DOTS },
+    )
+  }
+  const fronts = listFrontLines(model.fronts, scales)
+  drawFronts(context, fronts, ink)
+  drawContacts(context, model, scales, ink)
+
+  const taken = [...drawGoverning(context, model, scales, ink), ...drawGauges(context, model, scales, ink)]
+  const keyBox = measureKey(context, model, scales)
+  context.font = `400 ${model.axisSize}px ${FONT}`
+  const labels = listFrontLabels(fronts, (text) => context.measureText(text).width, model.axisSize)
+  const room = { left: 2, top: 2, right: width - 2, bottom: height - 2 }
+  for (const label of placeLabels(labels, room, [...taken, keyBox])) {
+    drawHaloText(context, label.text, label.x, label.y, {
+      font: `400 ${model.axisSize}px ${FONT}`,
+      ink,
+      halo: palette.paper,
+    })
+  }
+  drawKey(context, model, scales)
+}
+
+function drawSigns(
+  context: CanvasRenderingContext2D,
+  { signs, palette }: FieldModel,
+  scales: FieldScales,
+): void {
+  context.save()
+  context.strokeStyle = palette.ink
+  context.globalAlpha = 0.5
+  context.lineWidth = 1
+  context.beginPath()
+  for (const { across, up, positive } of signs) {
+    const x = Math.round(across * scales.width) + 0.5
+    const y = Math.round((1 - up) * scales.height) + 0.5
+    context.moveTo(x - 2.5, y)
+    context.lineTo(x + 2.5, y)
+    if (!positive) continue
+    context.moveTo(x, y - 2.5)
+    context.lineTo(x, y + 2.5)
+  }
+  context.stroke()
+  context.restore()
+}
+
+function drawContacts(
+  context: CanvasRenderingContext2D,
+  { contacts }: FieldModel,
+  { x, t }: FieldScales,
+  ink: string,
+): void {
+  context.fillStyle = ink
+  for (const spell of contacts) {
+    context.fillRect(x.at(spell.x) - CONTACT, t.at(spell.to), 2 * CONTACT, t.at(spell.from) - t.at(spell.to))
+  }
+}
+
+/** The ring and its chain lines; returns the areas that its words take. */
+function drawGoverning(
+  context: CanvasRenderingContext2D,
+  { governing, palette, bodySize }: FieldModel,
+  { x, t, width, height }: FieldScales,
+  ink: string,
+): Box[] {
+  if (!governing) return []
+  const atX = x.at(governing.x)
+  const atT = t.at(governing.t)
+  const style = { colour: ink, width: governing.over ? 2 : 1, dash: CHAIN }
+  if (atX > -1 && atX < width + 1) drawUprights(context, [atX], 0, height, style)
+  if (atT < -1 || atT > height + 1) return []
+  drawLevels(context, [atT], Math.max(0, atX + 9), width, style)
+  if (atX < -1 || atX > width + 1) return []
+
+  context.save()
+  for (const [radius, lineWidth, colour] of [
+    [8, 5, palette.paper],
+    [8, 2, ink],
+  ] as const) {
+    context.strokeStyle = colour
+    context.lineWidth = lineWidth
+    context.beginPath()
+    context.arc(atX, atT, radius, 0, 2 * Math.PI)
+    context.stroke()
+  }
+  context.fillStyle = ink
+  context.beginPath()
+  context.arc(atX, atT, 1.5, 0, 2 * Math.PI)
+  context.fill()
+  const font = `600 ${bodySize}px ${FONT}`
+  context.font = font
+  const wide = context.measureText(governing.text).width
+  context.restore()
+  const right = atX + 14 + wide < width - 4
+  const left = right ? atX + 14 : atX - 14 - wide
+  const y = atT - 12 < bodySize ? atT + 14 : atT - 12
+  drawHaloText(context, governing.text, left, y, { font, ink, halo: palette.paper, align: 'left' })
+  return [
+    { left: atX - 12, top: atT - 12, right: atX + 12, bottom: atT + 12 },
+    { left: left - 4, top: y - bodySize / 2 - 2, right: left + wide + 4, bottom: y + bodySize / 2 + 2 },
+  ]
+}
+
+function drawGauges(
+  context: CanvasRenderingContext2D,
+  { line, palette, axisSize }: FieldModel,
+  { x, width, height }: FieldScales,
+  ink: string,
+): Box[] {
+  const font = `600 ${axisSize}px ${FONT}`
+  const y = height - axisSize / 2 - 4
+  return (line?.gauges ?? []).flatMap((gauge) => {
+    const at = x.at(gauge.x)
+    if (at < 0 || at > width) return []
+    context.font = font
+    const wide = context.measureText(gauge.name).width
+    const left = at + 4 + wide < width - 2 ? at + 4 : at - 4 - wide
+    drawHaloText(context, gauge.name, left, y, { font, ink, halo: palette.paper, align: 'left' })
+    return [{ left: left - 2, top: y - axisSize / 2 - 2, right: left + wide + 2, bottom: height }]
+  })
+}
+
+/** Where the key stands: the lower right corner, above the names of gauges. */
+function measureKey(
+  context: CanvasRenderingContext2D,
+  model: FieldModel,
+  { width, height }: FieldScales,
+): Box {
+  context.font = `400 ${model.axisSize}px ${FONT}`
+  const wide = Math.max(0, ...model.key.map((text) => context.measureText(text).width))
+  const bottom = height - model.axisSize - 12
+  return {
+    left: width - wide - 14,
+    top: bottom - model.key.length * (model.axisSize + 3),
+    right: width,
+    bottom,
+  }
+}
+
+function drawKey(context: CanvasRenderingContext2D, model: FieldModel, scales: FieldScales): void {
+  const { top } = measureKey(context, model, scales)
+  model.key.forEach((text, i) => {
+    drawHaloText(context, text, scales.width - 10, top + (i + 0.5) * (model.axisSize + 3), {
+      font: `400 ${model.axisSize}px ${FONT}`,
+      ink: model.palette.unit,
+      halo: model.palette.paper,
+      align: 'right',
+    })
+  })
+}
