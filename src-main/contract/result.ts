@@ -11,6 +11,8 @@ export interface Result {
   envelope: EnvelopeTable
   sections: SectionPeaks[]
   governing: Governing | null
+  /** Factor n on every stress in the margins. */
+  factorOfSafety: number
   /** A row for each bar with a fatigue line, from the left; empty where no material has one. */
   fatigue: FatigueAnswer[]
   striker: StrikerAnswer | null
@@ -120,6 +122,9 @@ export interface SensePeak {
   kt: number | null
   /** Largest of the nominal peak and kt times the nominal stress at the fillet [Pa]. */
   local: number
+  /** Where [m] and when [s] the local stress is reached: at the fillet where that governs. */
+  localAt: number
+  localTime: number
   /** [Pa], positive, before the factor of safety; null where none was given. */
   allowable: number | null
   /** allowable / (factor of safety |local|) - 1; null without an allowable or without stress. */
@@ -241,6 +246,10 @@ export interface EndTable {
   impulse: number
   /** Work of the surroundings on the bar [J] */
   work: number
+  /** Time with force in all [s] */
+  contactTime: number
+  /** Velocity of the rigid mass at the end after the run, positive to the right [m/s]; null where none stands there. */
+  bodyVelocity: number | null
 }
 
 export interface BarState {
@@ -340,6 +349,7 @@ export type CautionCode =
   | 'negative-margin'
   | 'energy-closure'
   | 'short-run'
+  | 'laws-left-out'
   | 'fatigue-basis'
   | 'fatigue-range'
 

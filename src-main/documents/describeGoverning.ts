@@ -1,5 +1,4 @@
 import type { Result } from '../contract/result'
-import { evaluateSafetyFactor } from './evaluateSafetyFactor'
 import { formatMargin } from './format/formatMargin'
 import { formatQuantity } from './format/formatQuantity'
 import { formatSection } from './format/formatSection'
@@ -21,7 +20,7 @@ export interface GoverningWords {
  * @param result - SI
  * @returns margin, verdict and place
  */
-export function describeGoverning({ governing, sections }: Result): GoverningWords {
+export function describeGoverning({ governing, sections, factorOfSafety }: Result): GoverningWords {
   if (governing === null) {
     return {
       margin: 'none',
@@ -37,9 +36,9 @@ export function describeGoverning({ governing, sections }: Result): GoverningWor
   if (peak) {
     words.push(`local stress ${formatQuantity(peak.local, 'stress')}`)
     words.push(
-      `allowable ${formatQuantity(peak.allowable, 'stress')}, factor of safety ${formatQuantity(evaluateSafetyFactor(sections), 'ratio')}`,
+      `allowable ${formatQuantity(peak.allowable, 'stress')}, factor of safety ${formatQuantity(factorOfSafety, 'ratio')}`,
     )
-    words.push(`at ${formatQuantity(peak.at, 'length')}, ${formatQuantity(peak.time, 'time')}`)
+    words.push(`at ${formatQuantity(peak.localAt, 'length')}, ${formatQuantity(peak.localTime, 'time')}`)
   }
   return {
     margin: formatMargin(margin),

@@ -1,4 +1,4 @@
-import type { Result, SensePeak, StepRatios } from '../contract/result'
+import type { EndTable, Result, SensePeak, StepRatios } from '../contract/result'
 
 /** A level of the format: null for a plain value or a list of plain values, else its keys in order. */
 export type ShapeNode = null | readonly [ShapeNode] | { readonly [key: string]: ShapeNode }
@@ -29,8 +29,18 @@ const SENSE_PEAK: ShapeOf<SensePeak> = {
   time: null,
   kt: null,
   local: null,
+  localAt: null,
+  localTime: null,
   allowable: null,
   margin: null,
+}
+
+const END: ShapeOf<EndTable> = {
+  peakForce: null,
+  impulse: null,
+  work: null,
+  contactTime: null,
+  bodyVelocity: null,
 }
 
 /** The keys of `result.json` in the order in which they are written. */
@@ -77,6 +87,7 @@ export const RESULT_SHAPE: ShapeOf<Result> = {
     { bar: null, section: null, from: null, to: null, tension: SENSE_PEAK, compression: SENSE_PEAK },
   ],
   governing: { bar: null, section: null, sense: null, margin: null },
+  factorOfSafety: null,
   fatigue: [
     {
       bar: null,
@@ -121,8 +132,8 @@ export const RESULT_SHAPE: ShapeOf<Result> = {
     },
   ],
   ends: {
-    left: { peakForce: null, impulse: null, work: null },
-    right: { peakForce: null, impulse: null, work: null },
+    left: END,
+    right: END,
   },
   bars: [{ name: null, momentum: null, velocity: null, kinetic: null, strain: null }],
   energy: { t: null, kinetic: null, strain: null, dissipated: null, work: null, closure: null },

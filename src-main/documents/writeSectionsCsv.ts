@@ -7,6 +7,8 @@ const SENSE_HEADINGS = [
   'time [s]',
   'kt [1]',
   'local [Pa]',
+  'local at [m]',
+  'local time [s]',
   'allowable [Pa]',
   'margin [1]',
 ]
@@ -44,5 +46,6 @@ function sectionCells(section: SectionPeaks): CsvCell[] {
 }
 
 function peakCells(peak: SensePeak): CsvCell[] {
-  return [peak.peak, peak.at, peak.time, peak.kt, peak.local, peak.allowable, peak.margin]
+  const { kt, local, localAt, localTime, allowable, margin } = peak
+  return [peak.peak, peak.at, peak.time, kt, local, localAt, localTime, allowable, margin]
 }

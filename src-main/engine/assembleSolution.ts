@@ -62,6 +62,7 @@ export function assembleSolution(line: Line, record: RunRecord, beside: Beside):
     envelope: tabulateEnvelope(line, record.envelope),
     sections,
     governing,
+    factorOfSafety: rig.factorOfSafety,
     fatigue: beside.fatigue,
     striker: answerStriker(line, governing),
     gauges: tabulateGauges(line, record.gauges),

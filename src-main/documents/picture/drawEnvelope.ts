@@ -1,5 +1,4 @@
 import type { Result, SectionPeaks } from '../../contract/result'
-import { evaluateSafetyFactor } from '../evaluateSafetyFactor'
 import { formatNumber } from '../format/formatNumber'
 import { markup, type Markup } from '../markup'
 import { drawFrame, type Frame } from './drawFrame'
@@ -15,9 +14,8 @@ const HEIGHT = 340
  * @returns the picture with its key
  */
 export function drawEnvelope(result: Result): Markup {
-  const { envelope, sections } = result
-  const factor = evaluateSafetyFactor(sections)
-  const limits = listLimits(sections, factor ?? 1)
+  const { envelope, sections, factorOfSafety } = result
+  const limits = listLimits(sections, factorOfSafety)
   const domain = findRange([envelope.tension, envelope.compression, limits.map((limit) => limit.stress)])
   const picture = drawFrame(
     'Largest tension and compression along the line',
@@ -32,8 +30,7 @@ export function drawEnvelope(result: Result): Markup {
       markup`<path class="trace compression" d="${drawPath(pairs(envelope.x, envelope.compression), frame.x, frame.y)}"/>`,
     ],
   )
-  const meaning =
-    factor === null ? 'allowables' : `allowables divided by the factor of safety, ${formatNumber(factor)}`
+  const meaning = `allowables divided by the factor of safety, ${formatNumber(factorOfSafety)}`
   return markup`${picture}
 <p class="key">Nominal stresses, tension positive. Hatched lines: ${limits.length === 0 ? 'none, no allowable was given' : meaning};
 the hatching is on the forbidden side. Local stresses at fillets are higher; the table of peaks counts them.</p>`

@@ -13,7 +13,7 @@ import { drawFacts } from './drawFacts'
  */
 export function drawHead(result: Result): Markup {
   return markup`<h1>${result.rig.title === '' ? 'Rig without a title' : result.rig.title}</h1>
-<p class="key">${result.software.name} ${result.software.version}, method: ${result.method},
+<p class="key">${result.software.name} ${result.software.version}, method: ${result.method}${result.comparison === null ? '' : ', compared with elements'},
 run of ${formatQuantity(result.run.duration, 'time')}</p>
 <p class="notice">${result.notice}</p>
 ${drawGoverning(result)}

@@ -2,11 +2,13 @@ import { createHash } from 'node:crypto'
 import type { Result } from '../../contract/result'
 import { markup, Markup } from '../markup'
 import { makeReportStyle } from './reportStyle'
+import { drawComparisonPart } from './drawComparisonPart'
 import { drawFatiguePart } from './drawFatiguePart'
 import { drawHead } from './drawHead'
 import { drawLinePart } from './drawLinePart'
 import { drawProofPart } from './drawProofPart'
 import { drawRunParts } from './drawRunParts'
+import { drawSpallPart } from './drawSpallPart'
 import { drawStressPart } from './drawStressPart'
 
 /**
@@ -46,6 +48,8 @@ export function* writeReportParts(result: Result, rigText?: string): Generator<s
   yield drawHead(result).text
   yield drawStressPart(result).text
   yield drawFatiguePart(result.fatigue).text
+  yield drawSpallPart(result).text
+  yield drawComparisonPart(result.comparison).text
   yield drawLinePart(result).text
   for (const part of drawRunParts(result)) yield part.text
   yield drawProofPart(result, rigText).text

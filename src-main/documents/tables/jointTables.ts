@@ -26,7 +26,7 @@ export function makeJointsTable(joints: JointTable[]): Table {
  * Lists what the two ends of the line have done.
  *
  * @param ends - SI
- * @returns the left end, then the right end
+ * @returns the left end, then the right end; the velocity is that of a rigid mass after the run
  */
 export function makeEndsTable(ends: Result['ends']): Table {
   const rows: { name: string; end: EndTable }[] = [
@@ -39,6 +39,8 @@ export function makeEndsTable(ends: Result['ends']): Table {
       { heading: 'peak force', measures: 'force', value: ({ end }) => end.peakForce },
       { heading: 'impulse on the line', measures: 'momentum', value: ({ end }) => end.impulse },
       { heading: 'work on the line', measures: 'energy', value: ({ end }) => end.work },
+      { heading: 'time with force', measures: 'time', value: ({ end }) => end.contactTime },
+      { heading: 'mass there moves at', measures: 'velocity', value: ({ end }) => end.bodyVelocity },
     ],
     rows,
   )

@@ -5,6 +5,7 @@ import type {
   StepRatios,
   TaperAnswer,
 } from '../../contract/result'
+import { formatShare } from '../format/formatShare'
 import { formatSection } from '../format/formatSection'
 import { makeTable, type Table } from './table'
 
@@ -111,7 +112,7 @@ export function makeRoundingTable(rounding: RunSummary['travelTimeRounding']): T
   return makeTable<RunSummary['travelTimeRounding'][number]>(
     [
       { heading: 'section', measures: 'text', value: ({ bar, section }) => formatSection(bar, section) },
-      { heading: 'rounding [%]', measures: 'ratio', value: ({ error }) => error * 100 },
+      { heading: 'rounding', measures: 'text', value: ({ error }) => formatShare(error) },
     ],
     rounding,
   )

@@ -12,7 +12,7 @@ interface PeakRow {
  * Lists the peaks and margins of every section, a row for each sense.
  *
  * @param result - SI
- * @returns the table; a negative margin is named in words in its own column
+ * @returns the table, with place and time of the local stress; a negative margin is named in words in its own column
  */
 export function makePeaksTable(result: Result): Table {
   const rows = result.sections.flatMap((section): PeakRow[] => [
@@ -28,10 +28,10 @@ export function makePeaksTable(result: Result): Table {
       },
       { heading: 'sense', measures: 'text', value: (row) => row.sense },
       { heading: 'peak', measures: 'stress', value: ({ peak }) => peak.peak },
-      { heading: 'at', measures: 'length', value: ({ peak }) => peak.at },
-      { heading: 'time', measures: 'time', value: ({ peak }) => peak.time },
       { heading: 'Kt', measures: 'ratio', value: ({ peak }) => peak.kt },
       { heading: 'local', measures: 'stress', value: ({ peak }) => peak.local },
+      { heading: 'at', measures: 'length', value: ({ peak }) => peak.localAt },
+      { heading: 'time', measures: 'time', value: ({ peak }) => peak.localTime },
       { heading: 'allowable', measures: 'stress', value: ({ peak }) => peak.allowable },
       { heading: 'margin', measures: 'margin', value: ({ peak }) => peak.margin },
       { heading: 'verdict', measures: 'text', value: (row) => describeRow(row, result) },

@@ -1,7 +1,7 @@
 import { chooseUnit } from '../format/chooseUnit'
 import { formatMargin } from '../format/formatMargin'
 import { formatNumber } from '../format/formatNumber'
-import type { Quantity } from '../format/quantity'
+import type { Quantity, Unit } from '../format/quantity'
 
 /** A table for people, ready for a page or a terminal. */
 export interface Table {
@@ -24,7 +24,7 @@ export interface Column<Row> {
 const ROUNDING = 1e-12
 
 /**
- * Lays out a table: each column gets one unit, which its heading names.
+ * Lays out a table: all columns of one quantity get one unit, which their headings name.
  *
  * @param columns - in order from the left
  * @param rows - what the columns take their values from, SI
@@ -36,7 +36,14 @@ export function makeTable<Row>(
   rows: Row[],
   isAlarm: (row: Row) => boolean = () => false,
 ): Table {
-  const laid = columns.map((column) => layColumn(column, rows))
+  const units = new Map<Quantity, Unit>()
+  for (const { measures } of columns) {
+    if (measures === 'text' || measures === 'margin' || units.has(measures)) continue
+    const alike = columns.filter((column) => column.measures === measures)
+    const values = alike.flatMap((column) => listNumbers(rows.map(column.value)))
+    units.set(measures, chooseUnit(measures, values))
+  }
+  const laid = columns.map((column) => layColumn(column, rows, units))
   return {
     headings: laid.map((column) => column.heading),
     numeric: columns.map((column) => column.measures !== 'text'),
@@ -45,14 +52,21 @@ export function makeTable<Row>(
   }
 }
 
-function layColumn<Row>({ heading, measures, value }: Column<Row>, rows: Row[]) {
+function listNumbers(values: (string | number | null)[]): number[] {
+  return values.filter((value) => typeof value === 'number')
+}
+
+function layColumn<Row>(
+  { heading, measures, value }: Column<Row>,
+  rows: Row[],
+  units: ReadonlyMap<Quantity, Unit>,
+) {
   const values = rows.map(value)
   if (measures === 'text') return { heading, cells: values.map((text) => String(text ?? 'none')) }
   if (measures === 'margin')
     return { heading, cells: values.map((margin) => formatMargin(margin as number | null)) }
-  const numbers = values.filter((number) => typeof number === 'number')
-  const unit = chooseUnit(measures, numbers)
-  const nothing = ROUNDING * numbers.reduce((most, number) => Math.max(most, Math.abs(number)), 0)
+  const unit = units.get(measures)!
+  const nothing = ROUNDING * listNumbers(values).reduce((most, number) => Math.max(most, Math.abs(number)), 0)
   return {
     heading: unit.name === '' ? heading : `${heading} [${unit.name}]`,
     cells: values.map((number) => {

@@ -14,7 +14,7 @@ export function isProportional(rig: Rig): boolean {
   if (loads.length > 0 || gravity !== 0 || run.finiteStrain || run.spall) return false
   if (bars.some((bar) => bar.preload !== 0 || bar.displacement !== null)) return false
   const hardens = bars.some((bar) => bar.sections.some(({ material }) => material.hardening !== null))
-  if (run.method !== 'characteristics' && hardens) return false
+  if (run.method !== 'characteristics' && (hardens || run.bulkViscosity)) return false
   return joints.every(isProportionalJoint) && isProportionalEnd(leftEnd) && isProportionalEnd(rightEnd)
 }
 

@@ -7,6 +7,8 @@ type Sense = 'tension' | 'compression'
 
 /** Stresses that differ by less than this share are the same peak; the earlier one is named. */
 const SAME = 1e-12
+/** Share of the largest stress of a run under which another one is rounding and reads 0. */
+const ROUNDING = 1e-12
 
 /**
  * Largest tension and compression of every section with place, time, local stress and margin.
@@ -15,7 +17,8 @@ const SAME = 1e-12
  *     margin = allowable / (n |local|) - 1
  *
  * where n is the factor of safety. The stress at a shoulder is that of the smaller section's face, and
- * counts in that section. `kt` is the factor of the shoulder whose local stress is largest.
+ * counts in that section. `kt` is the factor of the shoulder whose local stress is largest. What is under
+ * 1e-12 of the largest stress of the run is rounding: it reads 0 and has no margin.
  *
  * @param line the cut line
  * @param record what the run recorded; of it the envelope
@@ -23,6 +26,7 @@ const SAME = 1e-12
  */
 export function listSectionPeaks(line: Line, record: Pick<RunRecord, 'envelope'>): SectionPeaks[] {
   const shoulders = listShoulders(line)
+  const rounding = ROUNDING * evaluateLargest(line, record)
   const rows: SectionPeaks[] = []
   for (let first = 0; first < line.spans.length;) {
     const { bar, section } = line.spans[first]
@@ -34,46 +38,74 @@ export function listSectionPeaks(line: Line, record: Pick<RunRecord, 'envelope'>
       section,
       from: line.spans[first].from,
       to: line.spans[last].to,
-      tension: evaluateSense(line, record, first, last, own, 'tension'),
-      compression: evaluateSense(line, record, first, last, own, 'compression'),
+      tension: evaluateSense(line, record, [first, last], own, 'tension', rounding),
+      compression: evaluateSense(line, record, [first, last], own, 'compression', rounding),
     })
     first = last + 1
   }
   return rows
 }
 
+/** A stress without its sign [Pa], its place [m] and the step in which it is reached. */
+interface Peak {
+  size: number
+  at: number
+  step: number
+}
+
 function evaluateSense(
   line: Line,
   record: Pick<RunRecord, 'envelope'>,
-  first: number,
-  last: number,
+  [first, last]: readonly [number, number],
   shoulders: LineShoulder[],
   sense: Sense,
+  rounding: number,
 ): SensePeak {
-  const nominal = findNominal(line, record, first, last, sense)
-  const sign = sense === 'tension' ? 1 : -1
-  let shoulderLocal = -1
-  let kt: number | null = null
-  for (const shoulder of shoulders) {
-    if (shoulder.factor.kt === null) continue
-    const position = record.envelope.start[shoulder.span] + shoulder.position
-    const area = line.spans[shoulder.span].area[shoulder.position]
-    const here = (shoulder.factor.kt * Math.abs(record.envelope[sense][position])) / area
-    if (here <= shoulderLocal) continue
-    shoulderLocal = here
-    kt = shoulder.factor.kt
-  }
-  const local = Math.max(nominal.size, shoulderLocal)
+  const nothing: Peak = { size: 0, at: line.spans[first].from, step: 0 }
+  const nominal = keepOver(rounding, findNominal(line, record, first, last, sense), nothing)
+  const shoulder = findShoulder(line, record, shoulders, sense)
+  const corner = shoulder === null ? nothing : keepOver(rounding, shoulder.peak, nothing)
+  const local = corner.size > nominal.size ? corner : nominal
   const allowable = line.spans[first].source.allowable[sense]
+  const signed = (size: number) => (size === 0 ? 0 : sense === 'tension' ? size : -size)
   return {
-    peak: nominal.size === 0 ? 0 : sign * nominal.size,
+    peak: signed(nominal.size),
     at: nominal.at,
     time: nominal.step * line.dt,
-    kt,
-    local: local === 0 ? 0 : sign * local,
+    kt: shoulder?.kt ?? null,
+    local: signed(local.size),
+    localAt: local.at,
+    localTime: local.step * line.dt,
     allowable,
-    margin: allowable === null || local === 0 ? null : allowable / (line.rig.factorOfSafety * local) - 1,
+    margin:
+      allowable === null || local.size === 0 ? null : allowable / (line.rig.factorOfSafety * local.size) - 1,
   }
+}
+
+function keepOver(rounding: number, peak: Peak, nothing: Peak): Peak {
+  return peak.size > rounding ? peak : nothing
+}
+
+function readSteps({ envelope }: Pick<RunRecord, 'envelope'>, sense: Sense): Int32Array {
+  return sense === 'tension' ? envelope.tensionStep : envelope.compressionStep
+}
+
+/** The shoulder with the largest local stress; null where none has a factor. */
+function findShoulder(
+  line: Line,
+  record: Pick<RunRecord, 'envelope'>,
+  shoulders: LineShoulder[],
+  sense: Sense,
+): { kt: number; peak: Peak } | null {
+  let worst: { kt: number; peak: Peak } | null = null
+  for (const { factor, span, position, x } of shoulders) {
+    if (factor.kt === null) continue
+    const index = record.envelope.start[span] + position
+    const nominal = Math.abs(record.envelope[sense][index]) / line.spans[span].area[position]
+    const peak = { size: factor.kt * nominal, at: x, step: readSteps(record, sense)[index] }
+    if (worst === null || peak.size > worst.peak.size) worst = { kt: factor.kt, peak }
+  }
+  return worst
 }
 
 function findNominal(
@@ -82,10 +114,10 @@ function findNominal(
   first: number,
   last: number,
   sense: Sense,
-): { size: number; at: number; step: number } {
+): Peak {
   const force = record.envelope[sense]
-  const steps = sense === 'tension' ? record.envelope.tensionStep : record.envelope.compressionStep
-  let best = { size: 0, at: line.spans[first].from, step: 0 }
+  const steps = readSteps(record, sense)
+  let best: Peak = { size: 0, at: line.spans[first].from, step: 0 }
   for (let i = first; i <= last; i++) {
     const span = line.spans[i]
     for (let p = 0; p <= span.cells; p++) {
@@ -97,4 +129,17 @@ function findNominal(
     }
   }
   return best
+}
+
+/** Largest stress of either sense anywhere [Pa]. */
+function evaluateLargest(line: Line, { envelope }: Pick<RunRecord, 'envelope'>): number {
+  let largest = 0
+  line.spans.forEach(({ cells, area }, i) => {
+    for (let p = 0; p <= cells; p++) {
+      const position = envelope.start[i] + p
+      const force = Math.max(envelope.tension[position], -envelope.compression[position])
+      largest = Math.max(largest, force / area[p])
+    }
+  })
+  return largest
 }

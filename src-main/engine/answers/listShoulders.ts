@@ -61,17 +61,17 @@ function evaluateFactor(
   widthLeft: number,
   widthRight: number,
 ): ShoulderFactor {
+  // What no radius could mend comes first.
   const reason =
-    fillet === null
-      ? 'no fillet radius was given'
+    left.source.material.modulus !== right.source.material.modulus
+      ? 'the material changes at the step'
       : (refuseSection(left.source) ?? refuseSection(right.source))
   if (reason) return { kt: null, inRange: false, reason }
-  if (left.source.material.modulus !== right.source.material.modulus)
-    return { kt: null, inRange: false, reason: 'the material changes at the step' }
+  if (fillet === null) return { kt: null, inRange: false, reason: 'no fillet radius was given' }
   return evaluateShoulderFactor({
     larger: Math.max(widthLeft, widthRight),
     smaller: Math.min(widthLeft, widthRight),
-    radius: fillet ?? 0,
+    radius: fillet,
     form: 'round',
   })
 }

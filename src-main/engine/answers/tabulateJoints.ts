@@ -1,6 +1,6 @@
 import type { EndTable, JointTable } from '../../contract/result'
 import type { Line } from '../line/line'
-import type { NodeTrace, RunRecord } from '../records/record'
+import type { EndRecord, NodeTrace, RunRecord } from '../records/record'
 
 /** Share of the peak force under which a joint counts as carrying none. */
 const FORCELESS = 1e-9
@@ -10,21 +10,12 @@ export function tabulateJoints(line: Line, record: RunRecord): JointTable[] {
   return line.rig.joints.map((joint, i) => {
     const [left, right] = [line.bars[i], line.bars[i + 1]]
     const { forceLeft } = record.node(left.lastSpan + 1)!
-    const peakForce = findPeak(forceLeft)
-    let impulse = 0
-    let first = -1
-    let count = 0
-    forceLeft.forEach((F, k) => {
-      impulse += F * line.dt
-      if (Math.abs(F) <= FORCELESS * Math.abs(peakForce)) return
-      if (first < 0) first = k
-      count++
-    })
+    const { peakForce, first, count } = findContact(forceLeft)
     return {
       name: `${left.name} | ${right.name}`,
       kind: joint.kind,
       peakForce,
-      impulse: impulse + 0,
+      impulse: forceLeft.reduce((sum, F) => sum + F * line.dt, 0) + 0,
       closedFrom: first < 0 ? null : first * line.dt,
       contactTime: count * line.dt,
       energyLost: record.jointLoss[i],
@@ -32,17 +23,28 @@ export function tabulateJoints(line: Line, record: RunRecord): JointTable[] {
   })
 }
 
-/** Makes the tables of the two ends. */
+/** Makes the tables of the two ends: their force is that of the bar's face. */
 export function tabulateEnds(line: Line, record: RunRecord): { left: EndTable; right: EndTable } {
-  const peakAt = (node: number) => findPeak((record.node(node) as NodeTrace).forceLeft)
+  const tabulate = (node: number, end: EndRecord): EndTable => {
+    const { peakForce, count } = findContact((record.node(node) as NodeTrace).forceLeft)
+    return { peakForce, ...end, contactTime: count * line.dt }
+  }
   return {
-    left: { peakForce: peakAt(0), ...record.ends.left },
-    right: { peakForce: peakAt(line.spans.length), ...record.ends.right },
+    left: tabulate(0, record.ends.left),
+    right: tabulate(line.spans.length, record.ends.right),
   }
 }
 
-function findPeak(force: Float64Array): number {
-  let peak = 0
-  for (const F of force) if (Math.abs(F) > Math.abs(peak)) peak = F
-  return peak
+/** Force of largest magnitude [N], the first step with force, -1 without any, and the count of such steps. */
+function findContact(force: Float64Array): { peakForce: number; first: number; count: number } {
+  let peakForce = 0
+  for (const F of force) if (Math.abs(F) > Math.abs(peakForce)) peakForce = F
+  let first = -1
+  let count = 0
+  force.forEach((F, k) => {
+    if (Math.abs(F) <= FORCELESS * Math.abs(peakForce)) return
+    if (first < 0) first = k
+    count++
+  })
+  return { peakForce, first, count }
 }

@@ -1,6 +1,7 @@
 import { NOTICE } from '../../contract/notice'
 import { cleanLine } from '../../documents/format/cleanLine'
 import { formatQuantity } from '../../documents/format/formatQuantity'
+import { formatShare } from '../../documents/format/formatShare'
 import { formatSection } from '../../documents/format/formatSection'
 import { makeBarsTable } from '../../documents/tables/lineTables'
 import { makeTable, type Table } from '../../documents/tables/table'
@@ -62,7 +63,7 @@ function makeCellsTable({ rig, rounding, spans }: Line): Table {
             .filter(({ bar, section }) => bar === row.bar && section === row.section)
             .reduce((sum, span) => sum + span.cells, 0),
       },
-      { heading: 'rounding of travel time [%]', measures: 'ratio', value: (row) => row.error * 100 },
+      { heading: 'rounding of travel time', measures: 'text', value: (row) => formatShare(row.error) },
     ],
     rounding,
   )

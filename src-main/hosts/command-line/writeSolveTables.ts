@@ -1,10 +1,12 @@
 import type { Result } from '../../contract/result'
 import { describeGoverning } from '../../documents/describeGoverning'
 import { cleanLine } from '../../documents/format/cleanLine'
-import { listClosures, listRunFacts, listStrikerFacts } from '../../documents/listFacts'
+import { listClosures, listComparison, listRunFacts, listStrikerFacts } from '../../documents/listFacts'
+import { makeComparisonTable } from '../../documents/tables/comparisonTable'
 import { makeFatigueTable } from '../../documents/tables/fatigueTables'
 import { makePulsesTable } from '../../documents/tables/gaugeTables'
 import { makePeaksTable } from '../../documents/tables/peaksTable'
+import { makeFragmentsTable, makeSpallsTable } from '../../documents/tables/spallTables'
 import { writeTextTable } from '../../documents/tables/writeTextTable'
 import { wrapText } from './wrapText'
 import { writeFacts } from './writeFacts'
@@ -16,7 +18,8 @@ const PULSES_PER_GAUGE = 4
  * Writes a result for the terminal, with what decides first.
  *
  * @param result - SI
- * @returns governing margin, striker, peaks, impacts to failure where known, first pulses at the gauges, closures, cautions and notice
+ * @returns governing margin, striker, peaks, impacts to failure where known, first pulses at the gauges, spall,
+ *   comparison of the methods, closures, cautions and notice
  */
 export function writeSolveTables(result: Result): string {
   return [
@@ -29,6 +32,8 @@ export function writeSolveTables(result: Result): string {
     result.gauges.length === 0
       ? 'Gauges: none\n'
       : `First pulses at the gauges\n${writeTextTable(makePulsesTable(result.gauges, PULSES_PER_GAUGE))}`,
+    ...writeSpall(result),
+    ...writeComparison(result),
     `Energy and momentum\n${writeFacts(listClosures(result))}`,
     `The run\n${writeFacts(listRunFacts(result))}`,
     writeCautions(result),
@@ -65,6 +70,24 @@ export function writeReportSummary(result: Result, file: string): string {
     `Report written to ${cleanLine(file)}\n`,
     wrapText(result.notice, WIDTH),
   ].join('\n')
+}
+
+function writeSpall({ spalls, fragments }: Result): string[] {
+  if (spalls.length === 0) return []
+  return [
+    `Spall\n${writeTextTable(makeSpallsTable(spalls))}`,
+    `Pieces at the end of the run\n${writeTextTable(makeFragmentsTable(fragments))}`,
+  ]
+}
+
+function writeComparison({ comparison }: Result): string[] {
+  if (comparison === null) return []
+  const { gauges, verdict } = comparison
+  const table = gauges.length === 0 ? '' : writeTextTable(makeComparisonTable(gauges))
+  return [
+    `The two methods compared; all other numbers are those of the characteristics\n` +
+      `  ${wrapText(verdict, WIDTH - 2, '  ')}${writeFacts(listComparison(comparison))}${table}`,
+  ]
 }
 
 function writeGoverning(result: Result): string {

@@ -96,6 +96,7 @@ export function makeTestResult(): Result {
       },
     ],
     governing: { bar: 'shaft', section: 0, sense: 'compression', margin: makePeak(-250.5e6, 900e6).margin! },
+    factorOfSafety: 1.5,
     fatigue: [
       {
         bar: 'shaft',
@@ -146,8 +147,8 @@ export function makeTestResult(): Result {
       },
     ],
     ends: {
-      left: { peakForce: 0, impulse: 0, work: 0 },
-      right: { peakForce: -70e3, impulse: -8.1, work: 0 },
+      left: { peakForce: 0, impulse: 0, work: 0, contactTime: 0, bodyVelocity: null },
+      right: { peakForce: -70e3, impulse: -8.1, work: 0, contactTime: 1.2e-4, bodyVelocity: 0.75 },
     },
     bars: [
       { name: 'striker', momentum: 0.5, velocity: 0.67, kinetic: 0.17, strain: 0.01 },
@@ -167,7 +168,13 @@ export function makeTestResult(): Result {
       { fromX: 0.8, fromT: 97e-6, toX: 1.2, toT: 175e-6, direction: 'right', force: 1.38, spread: true },
     ],
     field: makeField(),
-    comparison: null,
+    comparison: {
+      envelope: 0.0123,
+      envelopeAt: 0.8,
+      envelopeSense: 'compression',
+      gauges: [{ name: 'G1', largest: 0.034, rootMeanSquare: 0.0056 }],
+      verdict: 'The envelopes differ by up to 1.2 % of the largest stress.',
+    },
     spalls: [{ bar: 'shaft', x: 1.1, time: 3.1e-4, stress: 1.5e9 }],
     fragments: [{ bar: 'shaft', from: 1.1, to: 1.2, mass: 0.55, velocity: 7.4 }],
     cautions: [
@@ -191,7 +198,17 @@ function makeRatios(reflected: number): StepRatios {
 
 function makePeak(peak: number, allowable: number | null): SensePeak {
   const margin = allowable === null ? null : allowable / (1.5 * Math.abs(peak)) - 1
-  return { peak, at: 0.4, time: 96e-6, kt: null, local: peak, allowable, margin }
+  return {
+    peak,
+    at: 0.4,
+    time: 96e-6,
+    kt: null,
+    local: peak,
+    localAt: 0.45,
+    localTime: 99e-6,
+    allowable,
+    margin,
+  }
 }
 
 function makeField(): Result['field'] {

@@ -49,6 +49,8 @@ describe('a report is one page that stands alone', () => {
       'Envelope',
       'Stress over place and time',
       'Fatigue',
+      'Spall',
+      'The two methods compared',
       'The line',
       'Steps and joints',
       'Tapers',
@@ -69,6 +71,23 @@ describe('a report is one page that stands alone', () => {
       expect(path.getAttribute('d')).toMatch(/^([MLHVhvlz][-0-9. ]*)*$/)
     }
   })
+})
+
+test('the comparison of the methods says what it means, and which of them the page shows', () => {
+  const text = read(makeTestResult()).querySelector('main')!.textContent
+  expect(text).toContain('method: characteristics, compared with elements')
+  expect(text).toContain(
+    'The envelopes differ by up to 1.2 % of the largest stress. All other parts of this page show the characteristics.',
+  )
+  expect(text).toContain('1.230 % of the largest stress')
+  expect(text).toContain('3.400 %0.5600 %')
+})
+
+test('spalls and pieces stand with their places', () => {
+  const text = read(makeTestResult()).querySelector('main')!.textContent
+  expect(text).toContain('came apart at [mm]time [µs]tension [MPa]')
+  expect(text).toContain('shaft1100310.01500')
+  expect(text).toContain('shaft11001200100.00.55007.400')
 })
 
 describe('the governing margin', () => {
@@ -120,8 +139,12 @@ test('a run without gauges, tapers, joints, field and striker still makes a whol
     field: { x: [], t: [], stress: [] },
     striker: null,
     cautions: [],
+    spalls: [],
+    fragments: [],
+    comparison: null,
   }
   const page = read(result)
   expect(page.querySelector('main')!.textContent).toContain('The run recorded no field.')
+  expect(page.querySelector('main')!.textContent).not.toMatch(/Spall|methods compared/)
   expect(page.querySelector('main')!.textContent).not.toMatch(/NaN|undefined/)
 })

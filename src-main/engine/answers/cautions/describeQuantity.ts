@@ -1,6 +1,6 @@
 const UNITS = {
   length: [1e3, 'mm'],
-  time: [1e6, 'us'],
+  time: [1e6, 'µs'],
   stress: [1e-6, 'MPa'],
   force: [1e-3, 'kN'],
   share: [100, '%'],
@@ -12,7 +12,7 @@ const UNITS = {
  *
  * @param value in SI, an angle in radians
  * @param kind what it is
- * @returns such as `16 us` or `412 MPa`
+ * @returns such as `16 µs` or `412 MPa`
  */
 export function describeQuantity(value: number, kind: keyof typeof UNITS): string {
   const [scale, unit] = UNITS[kind]

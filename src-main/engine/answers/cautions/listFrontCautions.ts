@@ -6,6 +6,7 @@ import { describePlace } from '../describePlace'
 import { evaluateForceless } from '../evaluateForceless'
 import { describeQuantity } from './describeQuantity'
 import { joinPlaces } from './joinPlaces'
+import { listImpactRises } from './listImpactRises'
 
 /**
  * Cautions about fronts: shorter than the bar lets them be, and faces that are not flat.
@@ -54,12 +55,7 @@ function findSlowestRise(rig: Rig): { time: number; where: string } {
 /** The shortest rise or pulse that the rig sends off; null where none is known. */
 function findShortest(line: Line): { time: number; what: string } | null {
   const { rig } = line
-  const found: { time: number; what: string }[] = []
-  const gaps = [...rig.joints, rig.leftEnd, rig.rightEnd].some((each) => 'gap' in each && each.gap > 0)
-  const moves = rig.bars.some((bar) => bar.uniformVelocity !== 0 || bar.preload !== 0)
-  if (moves || [rig.leftEnd, rig.rightEnd].some((end) => end.kind === 'mass' && end.velocity !== 0))
-    found.push({ time: 0, what: 'The wave of an impact or a release' })
-  else if (gaps) found.push({ time: 0, what: 'The wave of a gap that closes' })
+  const found = listImpactRises(line)
   const ends: [string, End][] = [
     ['The pulse at the left end', rig.leftEnd],
     ['The pulse at the right end', rig.rightEnd],

@@ -1,4 +1,5 @@
 import type { Caution, SectionPeaks } from '../../../contract/result'
+import type { Rig } from '../../../contract/rig'
 import type { Line } from '../../line/line'
 import type { RunRecord } from '../../records/record'
 import { describePlace } from '../describePlace'
@@ -9,9 +10,12 @@ import { joinPlaces } from './joinPlaces'
 const ROUNDING = 0.005
 const CLOSURE = 1e-9
 const LAST = 0.02
+/** Share of the largest stress under which a late peak elsewhere is not worth a word. */
+const FAINT = 0.05
 
 /**
- * Cautions about the run itself: its closure, its length, its cells, and whose values it stands on.
+ * Cautions about the run itself: what its method leaves out, its closure, its length, its cells, and whose
+ * values it stands on.
  *
  * @param line the cut line
  * @param record of the run; its ledger
@@ -23,6 +27,7 @@ export function listRunCautions(
   sections: SectionPeaks[],
 ): Caution[] {
   return [
+    ...listLeftOut(line.rig),
     ...listClosure(record),
     ...listShortRun(line, sections),
     ...listRounding(line),
@@ -31,6 +36,29 @@ export function listRunCautions(
       message:
         'Densities, moduli and allowables are those of the rig file; published values are typical, not certified. ' +
         'Use values of your own material where lives or hardware depend on them.',
+      where: '',
+    },
+  ]
+}
+
+/** With both methods the tables are those of the characteristics, which follow fewer laws. */
+function listLeftOut({ run, bars }: Rig): Caution[] {
+  if (run.method !== 'both') return []
+  const materials = bars.flatMap((bar) => bar.sections.map(({ material }) => material))
+  const laws = [
+    materials.some((one) => one.yield !== null && one.hardening !== null) ? 'yielding' : '',
+    materials.some(({ viscosity }) => (viscosity ?? 0) > 0) ? 'viscosity' : '',
+    run.finiteStrain ? 'finite strain' : '',
+    run.lateralInertia ? 'lateral inertia' : '',
+    run.bulkViscosity ? 'bulk viscosity' : '',
+  ].filter((law) => law !== '')
+  if (laws.length === 0) return []
+  return [
+    {
+      code: 'laws-left-out',
+      message:
+        `All stresses, margins and traces of this result are those of the characteristics, which leave out ${laws.join(', ')}; ` +
+        'the elements were run for the comparison alone. For tables that follow these laws run with the method elements.',
       where: '',
     },
   ]
@@ -61,11 +89,8 @@ function listShortRun(line: Line, sections: SectionPeaks[]): Caution[] {
       `it lasts ${describeQuantity(duration, 'time')}, while a wave needs ${describeQuantity(back, 'time')} ` +
         `${back === across ? 'to cross the line' : 'to cross the line and come back'}`,
     )
-  const late = findDecisive(sections)
-  if (late !== null && late.time > duration * (1 - LAST))
-    reasons.push(
-      `the decisive stress comes in its last 2 % (${late.bar}, section ${late.section + 1}) and may still grow`,
-    )
+  const late = listLatePeaks(sections, duration * (1 - LAST))
+  if (late.length > 0) reasons.push(`peaks that come in its last 2 % may still grow (${joinPlaces(late)})`)
   if (reasons.length === 0) return []
   return [
     {
@@ -76,26 +101,28 @@ function listShortRun(line: Line, sections: SectionPeaks[]): Caution[] {
   ]
 }
 
-/** The stress that governs, or where no margin is known the largest one. */
-function findDecisive(sections: SectionPeaks[]): { bar: string; section: number; time: number } | null {
+/** The sections whose largest stress comes after a time [s], the governing one first; faint ones are passed over. */
+function listLatePeaks(sections: SectionPeaks[], after: number): string[] {
   const governing = findGoverning(sections)
-  if (governing !== null) {
-    const { bar, section, sense } = governing
-    return {
-      bar,
-      section,
-      time: sections.find((each) => each.bar === bar && each.section === section)![sense].time,
-    }
-  }
-  let decisive: { bar: string; section: number; time: number } | null = null
-  let largest = 0
-  for (const { bar, section, tension, compression } of sections)
-    for (const { local, time } of [tension, compression])
-      if (Math.abs(local) > largest) {
-        largest = Math.abs(local)
-        decisive = { bar, section, time }
-      }
-  return decisive
+  const peaks = sections.flatMap(({ bar, section, tension, compression }) =>
+    (
+      [
+        ['tension', tension],
+        ['compression', compression],
+      ] as const
+    ).map(([sense, { local, localTime }]) => ({
+      place: `${bar}, section ${section + 1}`,
+      sense,
+      size: Math.abs(local),
+      time: localTime,
+      governs: governing?.bar === bar && governing.section === section && governing.sense === sense,
+    })),
+  )
+  const faint = FAINT * peaks.reduce((most, { size }) => Math.max(most, size), 0)
+  return peaks
+    .filter(({ size, time, governs }) => time > after && size > 0 && (governs || size >= faint))
+    .sort((one, other) => Number(other.governs) - Number(one.governs))
+    .map(({ place, sense, governs }) => `${place}, ${sense}${governs ? ', which governs' : ''}`)
 }
 
 function listRounding(line: Line): Caution[] {

@@ -27,7 +27,7 @@ export function listStrengthCautions(line: Line, sections: SectionPeaks[]): Caut
   const rows = sections.map((peaks, i) => ({ ...sources[i], peaks }))
   return [
     ...listNegativeMargins(rows, line.rig.factorOfSafety),
-    ...listOverYield(rows),
+    ...listOverYield(rows, line.rig.run.method === 'elements'),
     ...(line.rig.run.finiteStrain ? [] : listLargeStrain(rows)),
     ...listNoAllowable(rows),
   ]
@@ -52,12 +52,13 @@ function listNegativeMargins(rows: Row[], factor: number): Caution[] {
   ]
 }
 
-function listOverYield(rows: Row[]): Caution[] {
+function listOverYield(rows: Row[], byElements: boolean): Caution[] {
   const over = rows
     .map(({ place, source, peaks: { tension, compression } }) => {
       const nominal = Math.max(tension.peak, -compression.peak)
       const local = Math.max(tension.local, -compression.local)
-      return { place, nominal, local, limit: source.material.yield ?? Infinity }
+      const { yield: limit, hardening } = source.material
+      return { place, nominal, local, limit: limit ?? Infinity, yields: byElements && hardening !== null }
     })
     .filter(({ local, limit }) => local > limit)
   if (over.length === 0) return []
@@ -68,13 +69,31 @@ function listOverYield(rows: Row[]): Caution[] {
       code: 'over-yield',
       message:
         `${only ? 'Local stress at a fillet' : 'Stress'} over yield: up to ${describeQuantity(worst.local, 'stress')} in ` +
-        `${worst.place}, yield ${describeQuantity(worst.limit, 'stress')}. The run is linear: ` +
-        (only
-          ? 'the corner yields, the waves hardly change.'
-          : 'real stresses are lower there, the part stays deformed, and what comes after is not as computed.'),
+        `${worst.place}, yield ${describeQuantity(worst.limit, 'stress')}. ` +
+        describeYielding(
+          only,
+          over.every(({ yields }) => yields),
+          byElements,
+        ),
       where: joinPlaces(over.map(({ place }) => place)),
     },
   ]
+}
+
+/** What stress over yield means for the numbers: only in corners, followed by the run, or left out by it. */
+function describeYielding(only: boolean, followed: boolean, byElements: boolean): string {
+  if (only) return 'The corner yields, which the run does not follow; the waves hardly change.'
+  if (followed) {
+    return (
+      'The run follows yielding and hardening, and the part stays deformed. Fillet factors and the strains of gauges ' +
+      'are still those of an elastic bar.'
+    )
+  }
+  const linear =
+    'The run is linear: real stresses are lower there, the part stays deformed, and what comes after is not as computed.'
+  return byElements
+    ? `${linear} Give the material its hardening, "0 Pa" for none, and the elements let it yield.`
+    : `${linear} With the hardening of the material given, a run by elements follows it.`
 }
 
 function listLargeStrain(rows: Row[]): Caution[] {

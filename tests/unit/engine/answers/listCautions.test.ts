@@ -28,6 +28,16 @@ const half = (peak: number, duration: number): Pulse => ({
 })
 const bar = (...sections: PlainSection[]) => [{ name: 'shaft', sections }]
 const straight: PlainSection = { length: 0.4, diameter: 0.02 }
+const CUSHION = {
+  kind: 'cushion',
+  stiffness: null,
+  curve: null,
+  unloading: null,
+  damping: 0,
+  mass: 0,
+  gap: 0,
+  tension: false,
+} as const
 /** A slow pulse that a 20 mm bar can carry: 4 d/c = 16 us. */
 const slow = { kind: 'force', pulse: half(10e3, 100e-6) } as const
 
@@ -50,8 +60,8 @@ describe('fronts', () => {
     const quick = { kind: 'force', pulse: half(10e3, 40e-6) } as const
     const sections = [straight, { length: 0.3, diameter: 0.04, fillet: 0 }]
     const caution = find(cautionsOf({ leftEnd: quick, bars: bar(...sections) }), 'short-rise')!
-    expect(caution.message).toContain('The pulse at the left end takes 13 us')
-    expect(caution.message).toContain('4 d/c = 32 us')
+    expect(caution.message).toContain('The pulse at the left end takes 13 µs')
+    expect(caution.message).toContain('4 d/c = 32 µs')
     expect(caution.where).toBe('shaft, section 2')
     expect(
       find(
@@ -79,6 +89,33 @@ describe('fronts', () => {
     expect(
       find(cautionsOf({ leftEnd: { kind: 'velocity', pulse: ramp }, bars: bar(straight) }), 'short-rise'),
     ).toBeUndefined()
+  })
+
+  it('sees that a cushion or a soft end spreads the wave of an impact', () => {
+    const Z = 8000 * 5000 * (Math.PI / 4) * 0.02 ** 2
+    const ram = (joint: object) =>
+      cautionsOf({
+        bars: [{ velocity: 5, sections: [straight] }, { sections: [straight] }],
+        joints: [{ ...CUSHION, ...joint }],
+        duration: 1e-3,
+      })
+    // Two equal bars: Z/2 between them, so the rise from 10 % to 90 % is ln 9 (Z/2)/K; 4 d/c = 16 µs.
+    const limit = (Math.log(9) * (Z / 2)) / 16e-6
+    expect(find(ram({ stiffness: 0.95 * limit }), 'short-rise')).toBeUndefined()
+    expect(find(ram({ stiffness: 1.3 * limit }), 'short-rise')!.message).toContain('takes 12.3 µs')
+    // A dashpot lets a share D/(D + Z/2) through at once: over 9/10 leaves no rise at all.
+    expect(find(ram({ stiffness: 0.1 * limit, damping: 5 * Z }), 'short-rise')!.message).toContain(
+      'at once',
+    )
+    const curve = { closing: [0, 1e-3, 2e-3], force: [0, 1e-3 * 0.1 * limit, 1.4e-3 * limit] }
+    expect(find(ram({ stiffness: null, curve }), 'short-rise')!.message).toContain('takes 12.3 µs')
+    const onto = (rightEnd: PlainRig['rightEnd']) =>
+      find(
+        cautionsOf({ bars: [{ velocity: 5, sections: [straight] }], rightEnd, duration: 1e-3 }),
+        'short-rise',
+      )
+    expect(onto({ kind: 'penetration', loading: 1.9 * limit, unloading: 9 * limit })).toBeUndefined()
+    expect(onto({ kind: 'wall', gap: 0 })!.message).toContain('at once')
   })
 
   it('warns of flat faces only where a contact has pressed', () => {
@@ -128,6 +165,11 @@ describe('shapes', () => {
     // D/d = 1.5, r/d = 0.1: 1.860345 (Pilkey, round, recomputed from the coefficients).
     expect(some.message).toContain('1.86')
     expect(cautions.filter(({ code }) => code === 'no-fillet-factor')).toHaveLength(1)
+    const brass = { ...STEEL, modulus: 100e9 }
+    const mixed = bar(straight, { length: 0.2, diameter: 0.03, material: brass })
+    expect(find(cautionsOf({ leftEnd: slow, bars: mixed }), 'no-fillet-factor')!.message).toContain(
+      'No fillet factor (the material changes at the step)',
+    )
   })
 
   it('names the gauges within one diameter of a step', () => {
@@ -169,6 +211,8 @@ describe('strength', () => {
       'over-yield',
     )!
     expect(whole.message).toMatch(/^Stress over yield: up to 200 MPa in shaft, section 1, yield 150 MPa/)
+    expect(whole.message).toContain('The run is linear')
+    expect(whole.message).toContain('a run by elements follows it')
     const corner = { ...straight, material: soft, fillet: 0.002 }
     const only = find(
       cautionsOf({
@@ -179,6 +223,23 @@ describe('strength', () => {
     )!
     expect(only.message).toMatch(/^Local stress at a fillet over yield/)
     expect(only.where).toBe('shaft, section 1')
+  })
+
+  it('says of stress over yield in a run by elements whether it is followed', () => {
+    const yielding = (material: typeof STEEL) => {
+      const { line, record } = runPlain({
+        dt,
+        duration: 600e-6,
+        leftEnd: press(200e6),
+        bars: bar({ ...straight, material }),
+      })
+      const rig = { ...line.rig, run: { ...line.rig.run, method: 'elements' as const } }
+      return find(evaluateCautions({ line: { ...line, rig }, record }), 'over-yield')!.message
+    }
+    expect(yielding({ ...STEEL, yield: 150e6, hardening: 0 })).toContain('The run follows yielding')
+    const elastic = yielding({ ...STEEL, yield: 150e6 })
+    expect(elastic).toContain('The run is linear')
+    expect(elastic).toContain('Give the material its hardening')
   })
 
   it('warns of strain over 2 %', () => {
@@ -211,7 +272,7 @@ describe('strength', () => {
     )!
     expect(caution.message).toContain('6.28 kN of compression')
     expect(caution.message).toContain('Euler load of 0.0248 kN')
-    expect(caution.message).toContain('160 us')
+    expect(caution.message).toContain('160 µs')
     expect(caution.where).toBe('shaft')
     expect(codesOf({ leftEnd: push(100e-6), rightEnd: { kind: 'matched' }, bars: bar(thin) })).not.toContain(
       'buckling',
@@ -223,7 +284,7 @@ describe('the run', () => {
   it('is too short where a wave has not come back, or the decisive stress comes last', () => {
     const short = find(cautionsOf({ leftEnd: slow, bars: bar(straight), duration: 100e-6 }), 'short-run')!
     expect(short.message).toContain(
-      'it lasts 100 us, while a wave needs 160 us to cross the line and come back',
+      'it lasts 100 µs, while a wave needs 160 µs to cross the line and come back',
     )
     expect(
       find(
@@ -240,7 +301,39 @@ describe('the run', () => {
       }),
       'short-run',
     )!
-    expect(late.message).toContain('the decisive stress comes in its last 2 % (shaft, section 1)')
+    expect(late.message).toContain(
+      'peaks that come in its last 2 % may still grow (shaft, section 1, compression, which governs)',
+    )
+  })
+
+  it('is short as well where a peak that does not govern comes last', () => {
+    const late: Pulse = {
+      shape: 'formula',
+      value: (t) => (t < 50e-6 ? 10e3 : t > 501e-6 ? -3e3 : 0),
+      rise: null,
+      breaks: [],
+    }
+    const plain = { rightEnd: { kind: 'matched' }, bars: bar(straight), duration: 500e-6 } as const
+    const caution = find(cautionsOf({ leftEnd: { kind: 'force', pulse: late }, ...plain }), 'short-run')
+    expect(caution).toBeUndefined()
+    const longer = cautionsOf({ leftEnd: { kind: 'force', pulse: late }, ...plain, duration: 506e-6 })
+    expect(find(longer, 'short-run')!.message).toContain('(shaft, section 1, tension)')
+  })
+
+  it('leaves laws out with both methods, and says which', () => {
+    const { line, record } = runPlain({ dt, leftEnd: slow, bars: bar(straight) })
+    const both = (run: object) =>
+      find(
+        evaluateCautions({
+          line: { ...line, rig: { ...line.rig, run: { ...line.rig.run, method: 'both', ...run } } },
+          record,
+        }),
+        'laws-left-out',
+      )
+    expect(both({})).toBeUndefined()
+    expect(both({ finiteStrain: true, lateralInertia: true })!.message).toContain(
+      'leave out finite strain, lateral inertia;',
+    )
   })
 
   it('rounds travel times', () => {
@@ -262,7 +355,7 @@ describe('the run', () => {
 
 describe('words', () => {
   it('are to three figures in the unit of the bench', () => {
-    expect(describeQuantity(16.04e-6, 'time')).toBe('16 us')
+    expect(describeQuantity(16.04e-6, 'time')).toBe('16 µs')
     expect(describeQuantity(0.01234, 'length')).toBe('12.3 mm')
     expect(describeQuantity(-412.4e6, 'stress')).toBe('-412 MPa')
   })

@@ -59,10 +59,39 @@ describe('peaks of the sections', () => {
     expect(first.tension.time).toBeCloseTo(40e-6, 14)
     expect(first.tension.local / first.tension.peak).toBeCloseTo(1.964545, 6)
     expect(first.tension.margin).toBeCloseTo(400e6 / (1.5 * 1.964545 * (20e3 / small)) - 1, 6)
+    expect(first.tension.localAt).toBeCloseTo(0.02, 14)
+    expect(first.tension.localTime).toBe(first.tension.time)
     expect(second.tension).toMatchObject({ kt: null, peak: second.tension.local })
     expect(second.tension.peak).toBeCloseTo(20e3 / (4 * small), 3)
     expect(second).toMatchObject({ bar: 'shaft', section: 1 })
     expect(second.from).toBeCloseTo(0.02, 14)
+  })
+
+  it('tells the place of the local stress apart from that of the nominal peak', () => {
+    const line = shaft(0.002)
+    // 30 kN at one place inside, 20 kN at the fillet: 1.96 x 20 is more than 30.
+    const envelope = makeEnvelope(line, (i, p) => (i === 0 && p === 1 ? 30e3 : 20e3))
+    const [{ tension }] = listSectionPeaks(line, { envelope })
+    expect(tension.peak).toBeCloseTo(30e3 / small, 3)
+    expect(tension.at).toBeCloseTo(0.005, 14)
+    expect(tension.time).toBeCloseTo(10e-6, 14)
+    expect(tension.local / (20e3 / small)).toBeCloseTo(1.964545, 6)
+    expect(tension.localAt).toBeCloseTo(0.02, 14)
+    expect(tension.localTime).toBeCloseTo(40e-6, 14)
+  })
+
+  it('reads what is rounding beside the largest stress of the run as none', () => {
+    const line = shaft(0.002)
+    const envelope = makeEnvelope(
+      line,
+      () => 1e-9,
+      (i) => (i === 0 ? -20e3 : -1e-9),
+    )
+    const [first, second] = listSectionPeaks(line, { envelope })
+    for (const { peak, local, margin } of [first.tension, second.tension, second.compression]) {
+      expect([peak, local, margin]).toEqual([0, 0, null])
+    }
+    expect(first.compression.margin).not.toBeNull()
   })
 
   it('keeps the nominal peak where it is larger than the local stress at the shoulder', () => {

@@ -31,7 +31,7 @@ describe('cautions on fatigue', () => {
       'fatigue line of the rig file',
     ])
       expect(basis.message).toContain(words)
-    expect(basis.message).toContain('only the 100 us of the run')
+    expect(basis.message).toContain('only the 100 µs of the run')
     expect(basis.message).not.toContain('still growing')
     expect(basis.message).not.toContain('Corners without')
     expect(basis.message).not.toContain('no fatigue line')
