@@ -16,6 +16,14 @@ export const TRIANGLE_SPALLS: PublishedTable = {
   ],
 }
 
+/** Momentum of the same pulse per area, and what its spalls carry off; 100 Pa s stay in the bar. */
+export const TRIANGLE_MOMENTUM: PublishedTable = {
+  source: SOURCE,
+  label: 'Momentum of a triangular pulse',
+  columns: ['pulse, per area [Pa s]', 'spalls, per area [Pa s]'],
+  rows: [[10000, 9900]],
+}
+
 /** Square pulse of 500 MPa, 0.10 m long, in the same bar: one spall takes all its momentum. */
 export const SQUARE_SPALL: PublishedTable = {
   source: SOURCE,
