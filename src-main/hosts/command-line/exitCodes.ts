@@ -5,6 +5,8 @@ export const EXIT = {
   fault: 1,
   /** The input is refused; every reason stands on standard error. */
   refused: 2,
+  /** A published check fails on this machine. */
+  failedCheck: 3,
   /** Stopped by Ctrl-C or by a request to end, before anything was written. */
   stopped: 130,
 } as const

@@ -15,15 +15,3 @@ export function studyCommand(rigPath: string, terminal: Terminal): number {
     'faults' in opened ? opened.faults : [{ path: 'studies', message: 'studies are not computed yet' }]
   return printRefusals(terminal, rigPath, faults)
 }
-
-/**
- * `selfcheck`: says that the published checks are not run by the program itself yet.
- *
- * @param terminal - where it prints
- * @returns the exit status of a refusal
- */
-export function selfcheckCommand(terminal: Terminal): number {
-  return printRefusals(terminal, 'selfcheck', [
-    { path: '', message: 'the published checks are not run from the command line yet' },
-  ])
-}

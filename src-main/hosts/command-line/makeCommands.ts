@@ -2,8 +2,9 @@ import { Command, InvalidArgumentError, Option } from 'commander'
 import { NOTICE } from '../../contract/notice'
 import { SOFTWARE } from '../../contract/software'
 import { checkCommand } from './checkCommand'
-import { selfcheckCommand, studyCommand } from './laterCommands'
+import { studyCommand } from './laterCommands'
 import { reportCommand } from './reportCommand'
+import { selfcheckCommand } from './selfcheckCommand'
 import { serveCommand } from './serveCommand'
 import { solveCommand, type SolveOptions } from './solveCommand'
 import type { Terminal } from './terminal'
@@ -57,8 +58,9 @@ export function makeCommands(terminal: Terminal, finish: (status: number) => voi
     )
   program
     .command('selfcheck')
-    .description('the published checks, each with its source and its error (not computed yet)')
-    .action(() => finish(selfcheckCommand(terminal)))
+    .description('published results computed again on this machine, each with its source and its error')
+    .option('--json', 'every value of every check, in place of the table')
+    .action(async (options: { json?: boolean }) => finish(await selfcheckCommand(options, terminal)))
   program
     .command('serve')
     .description("the window's page, on this machine alone")

@@ -70,7 +70,6 @@ describe('usage', () => {
 describe('what is not computed yet is refused, and says so', () => {
   test.each([
     [(at: string) => ['study', at], /^studies: .*not computed yet\n$/],
-    [() => ['selfcheck'], /^selfcheck: .* not run .* yet\n$/],
   ])('%s', async (argv, message) => {
     expect(await run(argv(rig))).toEqual({ status: 2, out: '', err: expect.stringMatching(message) })
   })
