@@ -1,8 +1,9 @@
 import vue from '@vitejs/plugin-vue'
 import { defineConfig } from 'vitest/config'
+import { nodeWorkers } from './tests/nodeWorkers.ts'
 
 export default defineConfig({
-  plugins: [vue()],
+  plugins: [vue(), nodeWorkers()],
   test: {
     include: ['tests/**/*.test.ts'],
     environment: 'node',

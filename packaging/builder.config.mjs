@@ -4,8 +4,9 @@ export default {
   productName: 'Barwright',
   copyright: 'Barwright authors, MIT',
   directories: { output: 'dist', buildResources: 'packaging' },
-  // Everything is bundled into out/, so no package goes along.
-  files: ['out/main/**', 'out/preload/**', 'out/renderer/**', 'package.json', 'LICENSE'],
+  // Everything is bundled into out/, so no package goes along. The samples are in it for the page, and
+  // beside it for the user.
+  files: ['out/main/**', 'out/preload/**', 'out/renderer/**', 'samples/**', 'package.json', 'LICENSE'],
   extraResources: [{ from: 'samples', to: 'samples' }],
   asar: true,
   npmRebuild: false,

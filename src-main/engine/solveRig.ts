@@ -8,16 +8,21 @@ import { makeElementMethod } from './elements/makeElementMethod'
 import { assembleSolution, type Solution } from './assembleSolution'
 import { makeLine } from './line/makeLine'
 import type { Line } from './line/line'
+import { joinRecorders } from './march/joinRecorders'
 import { makeMarch, type March } from './march/march'
 import type { MethodRun } from './march/methodRun'
+import type { FieldWindow } from './records/field/pixels'
+import { makeRunField, type RunField } from './records/field/makeRunField'
 import { makeRecords, type Records } from './records/makeRecords'
 import type { RunRecord } from './records/record'
 
-export type { Solution }
+export type { FieldWindow, RunField, Solution }
 
 /** A rig on its way to a solution, marched slice by slice by its host. */
 export interface Solve {
   readonly line: Line
+  /** The field of its main run, to be looked into once the solve is complete; null where it was not asked for. */
+  readonly field: RunField | null
   /** Steps done so far, out of `steps`, over all its runs. */
   readonly step: number
   readonly steps: number
@@ -33,6 +38,7 @@ interface Phase {
   run: MethodRun
   records: Records
   march: March
+  field: RunField | null
 }
 
 /**
@@ -41,16 +47,17 @@ interface Phase {
  * places that the first run found worst.
  *
  * @param rig a checked rig; its size was checked by the reader
- * @param options full: keep the field at every cell and step
+ * @param options full: keep the field at every cell and step in the solution; field: keep what it takes
+ *   to look into the field afterwards
  */
-export function makeSolve(rig: Rig, options: { full?: boolean } = {}): Solve {
+export function makeSolve(rig: Rig, options: { full?: boolean; field?: boolean } = {}): Solve {
   const waveLine = makeLine(rig)
   const { method } = rig.run
   const line = method === 'elements' ? makeElementLine(waveLine) : waveLine
   const makeMain = () => (method === 'elements' ? makeElementMethod(line) : makeWaveMethod(line))
   const watches = rig.bars.some((bar) => bar.sections.some((section) => section.material.fatigue !== null))
 
-  const main = makePhase(makeMain(), options.full ?? false)
+  const main = makePhase(makeMain(), options.full ?? false, options.field)
   const planned = [line.steps + 1]
   const other = method === 'both' ? makeElementLine(waveLine) : null
   if (other !== null) planned.push(other.steps + 1)
@@ -79,6 +86,7 @@ export function makeSolve(rig: Rig, options: { full?: boolean } = {}): Solve {
 
   return {
     line,
+    field: main.field,
     steps,
     get step() {
       return done.includes(phase) ? countDone() : countDone() + phase.march.step
@@ -107,9 +115,11 @@ export function makeSolve(rig: Rig, options: { full?: boolean } = {}): Solve {
   }
 }
 
-function makePhase(run: MethodRun, full: boolean): Phase {
+function makePhase(run: MethodRun, full: boolean, withField = false): Phase {
   const records = makeRecords(run, full)
-  return { run, records, march: makeMarch(run, records, run.line.steps) }
+  const field = withField ? makeRunField(run) : null
+  const recorder = field === null ? records : joinRecorders(records, field)
+  return { run, records, field, march: makeMarch(run, recorder, run.line.steps) }
 }
 
 /** Nominal stress at a watched place over the run [Pa]. */

@@ -1,4 +1,5 @@
-import { BRIDGE_METHODS, BRIDGE_TEXT_LIMIT, type BridgeCall, type BridgeMethod } from '../contract/bridge'
+import type { BridgeCall, BridgeMethod } from '../contract/bridgeCall'
+import { CALL_CHECKS } from './callChecks'
 
 /**
  * Checks that a message from the page is one of the bridge's methods with the arguments it takes.
@@ -10,21 +11,19 @@ export function checkCall(message: unknown): { call: BridgeCall } | { refused: s
   if (typeof message !== 'object' || message === null) return { refused: 'A message must be an object.' }
   const { method, args } = message as Record<string, unknown>
   if (!isMethod(method)) return { refused: 'The message names no method of the bridge.' }
-  const wanted = BRIDGE_METHODS[method]
-  if (!Array.isArray(args) || args.length !== wanted.length) {
-    return { refused: `"${method}" takes ${wanted.length} argument(s) in a list.` }
+  const checks = CALL_CHECKS[method]
+  if (!Array.isArray(args) || args.length !== checks.length) {
+    return { refused: `"${method}" takes ${checks.length} argument(s) in a list.` }
   }
-  const texts: string[] = []
-  for (const value of args) {
-    if (typeof value !== 'string') return { refused: `"${method}" takes text only.` }
-    if (value.length > BRIDGE_TEXT_LIMIT) {
-      return { refused: `"${method}" got ${value.length} characters; at most ${BRIDGE_TEXT_LIMIT} are read.` }
-    }
-    texts.push(value)
+  const kept: unknown[] = []
+  for (const [i, check] of checks.entries()) {
+    const checked = check(args[i], `Argument ${i + 1} of "${method}"`)
+    if ('refused' in checked) return checked
+    kept.push(checked.value)
   }
-  return { call: { method, args: texts } }
+  return { call: { method, args: kept } }
 }
 
 function isMethod(method: unknown): method is BridgeMethod {
-  return typeof method === 'string' && Object.hasOwn(BRIDGE_METHODS, method)
+  return typeof method === 'string' && Object.hasOwn(CALL_CHECKS, method)
 }

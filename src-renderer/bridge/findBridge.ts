@@ -1,5 +1,7 @@
-import type { Bridge, BridgeReply } from '../../src-main/contract/bridge'
+import type { Bridge } from '../../src-main/contract/bridge'
+import type { BridgeReply } from '../../src-main/contract/bridgeCall'
 import { BRIDGE_GLOBAL } from '../../src-main/contract/bridgeChannel'
+import { unpackReply } from '../../src-main/contract/packReply'
 import { makeBridge, type CarryCall } from './makeBridge'
 
 /**
@@ -11,9 +13,9 @@ import { makeBridge, type CarryCall } from './makeBridge'
  */
 export function findBridge(page: Window): Bridge | null {
   const desktop = (page as unknown as Record<string, { call: CarryCall } | undefined>)[BRIDGE_GLOBAL]
-  if (desktop) return makeBridge(desktop.call)
+  if (desktop) return makeBridge(desktop.call, true)
   const token = page.location.hash.slice(1)
-  return token === '' ? null : makeBridge((method, args) => post(page, token, { method, args }))
+  return token === '' ? null : makeBridge((method, args) => post(page, token, { method, args }), false)
 }
 
 async function post(page: Window, token: string, message: unknown): Promise<BridgeReply> {
@@ -22,6 +24,6 @@ async function post(page: Window, token: string, message: unknown): Promise<Brid
     headers: { Authorization: `Bearer ${token}`, 'Content-Type': 'application/json' },
     body: JSON.stringify(message),
   })
-  const isReply = response.headers.get('Content-Type')?.startsWith('application/json') ?? false
-  return isReply ? ((await response.json()) as BridgeReply) : { error: await response.text() }
+  const isReply = response.headers.get('Content-Type') === 'application/octet-stream'
+  return isReply ? unpackReply(await response.arrayBuffer()) : { error: await response.text() }
 }

@@ -60,7 +60,7 @@ export const layers = [
   {
     name: 'workers',
     what: 'jobs off the main thread',
-    may: ['contract', 'engine', 'planning', 'studies', 'selfcheck', 'documents'],
+    may: ['contract', 'engine', ...engine('rig'), 'planning', 'studies', 'selfcheck', 'documents'],
   },
   {
     name: 'service',
@@ -68,7 +68,7 @@ export const layers = [
     may: ['contract', 'engine', ...engine('rig'), 'planning', 'studies', 'workers', 'documents'],
   },
   { name: 'hosts/browser', what: "the machine's browser", may: ['contract', 'service'] },
-  { name: 'hosts/desktop', what: 'Electron', may: ['contract', 'service'] },
+  { name: 'hosts/desktop', what: 'Electron', may: ['contract', 'documents', 'service'] },
   {
     name: 'hosts/command-line',
     what: 'the terminal; `serve` starts the browser host',

@@ -6,7 +6,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { NOTICE } from '../../src-main/contract/notice'
 import { SOFTWARE } from '../../src-main/contract/software'
 import { canPack, howPacked, packProgram, type PackedProgram } from '../checks/packProgram'
-import { PIN_RIG } from '../unit/service/pinRig'
+import { PIN_RIG } from '../unit/workers/pinRig'
 import { BROWSER_FLAGS, findBrowser, HOW_TO_GET_A_BROWSER } from './findBrowser'
 
 const executablePath = findBrowser()

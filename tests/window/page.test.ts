@@ -5,7 +5,7 @@ import { afterAll, beforeAll, beforeEach, afterEach, describe, expect, it } from
 import { NOTICE } from '../../src-main/contract/notice'
 import { SOFTWARE } from '../../src-main/contract/software'
 import { startBrowserHost, type BrowserHost } from '../../src-main/hosts/browser/startBrowserHost'
-import { PIN_RIG } from '../unit/service/pinRig'
+import { PIN_RIG } from '../unit/workers/pinRig'
 import { BROWSER_FLAGS, findBrowser, HOW_TO_GET_A_BROWSER } from './findBrowser'
 
 const executablePath = findBrowser()

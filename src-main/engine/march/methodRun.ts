@@ -65,6 +65,15 @@ export interface Fragment {
   momentum: number
 }
 
+/**
+ * The waves in a uniform span over the whole run: at position p (0..cells) and step k,
+ * `f = right[k - p + cells]` and `g = left[k + p]`, shape (cells + steps + 1) each [N].
+ */
+export interface SpanWaves {
+  right: Float64Array
+  left: Float64Array
+}
+
 /** A position of a span. */
 export interface SpanPlace {
   span: number
@@ -93,6 +102,13 @@ export interface MethodRun extends Method {
    * shape of `places`.
    */
   makeForceReader(places: readonly SpanPlace[]): (k: number, row: Float64Array) => void
+  /**
+   * The same for the velocity in the falling frame [m/s]; by elements that of half a step later. Where a
+   * bar came apart it is that of the right-hand face.
+   */
+  makeVelocityReader(places: readonly SpanPlace[]): (k: number, row: Float64Array) => void
+  /** The waves of a span that the method keeps over the whole run; null where it keeps the latest step only. */
+  readWaves(span: number): SpanWaves | null
   readExtremes(span: number): SpanExtremes
   /** Asks for the history of a position; call before the first step. */
   addProbe(span: number, position: number): void

@@ -2,11 +2,13 @@ import { randomBytes } from 'node:crypto'
 import { readFile } from 'node:fs/promises'
 import { createServer, type IncomingMessage, type ServerResponse } from 'node:http'
 import type { AddressInfo } from 'node:net'
-import { BRIDGE_TEXT_LIMIT, type Bridge } from '../../contract/bridge'
+import { BRIDGE_TEXT_LIMIT } from '../../contract/bridgeCall'
+import { packReply } from '../../contract/packReply'
 import { answerCall } from '../../service/answerCall'
 import { BUNDLE_HEADERS } from '../../service/bundlePolicy'
 import { findBundleFile } from '../../service/findBundleFile'
-import { makeService } from '../../service/makeService'
+import { makeService, type Service } from '../../service/makeService'
+import { findSamplesFolder } from '../../service/samples'
 import { checkRequest, type RequestGuard } from './checkRequest'
 import { readBody } from './readBody'
 
@@ -37,7 +39,7 @@ export interface BrowserHost {
  */
 export async function startBrowserHost(options: BrowserHostOptions): Promise<BrowserHost> {
   const guard: RequestGuard = { port: options.port, token: randomBytes(32).toString('base64url') }
-  const service = makeService()
+  const service = makeService({ samplesFolder: findSamplesFolder(options.bundleFolder) })
   const server = createServer((request, response) => {
     answerRequest(request, response, { guard, service, bundleFolder: options.bundleFolder }).catch(() => {
       response.destroy()
@@ -46,21 +48,24 @@ export async function startBrowserHost(options: BrowserHostOptions): Promise<Bro
   await new Promise<void>((resolve, reject) => {
     server.once('error', reject)
     server.listen(options.port, '127.0.0.1', resolve)
+  }).catch(async (error: Error) => {
+    await service.close()
+    throw error
   })
   guard.port = (server.address() as AddressInfo).port
   return {
     address: `http://127.0.0.1:${guard.port}/#${guard.token}`,
-    close: () =>
-      new Promise((resolve) => {
-        server.close(() => resolve())
-        server.closeAllConnections()
-      }),
+    async close() {
+      const closed = new Promise<void>((resolve) => server.close(() => resolve()))
+      server.closeAllConnections()
+      await Promise.all([closed, service.close()])
+    },
   }
 }
 
 interface Site {
   guard: RequestGuard
-  service: Bridge
+  service: Service
   bundleFolder: string
 }
 
@@ -79,7 +84,7 @@ async function answerRequest(request: IncomingMessage, response: ServerResponse,
 async function answerBridge(
   request: IncomingMessage,
   response: ServerResponse,
-  service: Bridge,
+  service: Service,
 ): Promise<void> {
   if (request.method !== 'POST') return send(response, 405, 'Only called here.')
   const body = await readBody(request, BODY_LIMIT)
@@ -87,9 +92,9 @@ async function answerBridge(
     response.setHeader('Connection', 'close')
     return send(response, 413, `At most ${BODY_LIMIT} bytes are read.`)
   }
-  const { reply, status } = await answerCall(service, parseMessage(body))
+  const { reply, status } = await answerCall({ service, files: null }, parseMessage(body))
   const code = { done: 200, refused: 400, fault: 500 }[status]
-  send(response, code, JSON.stringify(reply), 'application/json; charset=utf-8')
+  send(response, code, packReply(reply), 'application/octet-stream')
 }
 
 function parseMessage(body: string): unknown {
@@ -103,7 +108,7 @@ function parseMessage(body: string): unknown {
 function send(
   response: ServerResponse,
   status: number,
-  content: string | Buffer,
+  content: string | Uint8Array,
   contentType = 'text/plain; charset=utf-8',
 ): void {
   response.writeHead(status, {

@@ -1,4 +1,4 @@
-import { solveInSlices, type SliceOutcome } from '../../service/solveInSlices'
+import { solveInSlices, type SliceOutcome } from '../../workers/solveInSlices'
 import { makeProgress } from './makeProgress'
 import type { OpenRig } from './openRig'
 import type { Terminal } from './terminal'

@@ -1,18 +1,18 @@
 import type { IpcMainInvokeEvent } from 'electron'
-import type { Bridge, BridgeReply } from '../../contract/bridge'
-import { answerCall } from '../../service/answerCall'
+import type { BridgeReply } from '../../contract/bridgeCall'
+import { answerCall, type CallOwners } from '../../service/answerCall'
 import { isPageAddress } from './pageAddress'
 
 /**
  * Answers one message that came in on the bridge's channel, if the page itself sent it.
  *
- * @param service - what carries the methods out
+ * @param owners - what carries the methods out for the window that the message came from
  * @param event - who sent it: only the top frame of a window that shows the page is answered
  * @param message - whatever arrived, of any type
  * @returns the reply as plain data
  */
 export async function answerBridge(
-  service: Bridge,
+  owners: CallOwners,
   event: Pick<IpcMainInvokeEvent, 'senderFrame'>,
   message: unknown,
 ): Promise<BridgeReply> {
@@ -20,5 +20,5 @@ export async function answerBridge(
   if (!frame || frame.parent !== null || !isPageAddress(frame.url)) {
     return { error: 'Only the page itself is answered.' }
   }
-  return (await answerCall(service, message)).reply
+  return (await answerCall(owners, message)).reply
 }

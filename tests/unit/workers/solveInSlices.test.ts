@@ -4,7 +4,7 @@ import type { Rig } from '../../../src-main/contract/rig'
 import { SOFTWARE } from '../../../src-main/contract/software'
 import { readRig } from '../../../src-main/engine/rig/readRig'
 import { makeSolve, type Solution } from '../../../src-main/engine/solveRig'
-import { solveInSlices, type SliceOptions } from '../../../src-main/service/solveInSlices'
+import { solveInSlices, type SliceOptions } from '../../../src-main/workers/solveInSlices'
 import { PIN_RIG } from './pinRig'
 
 function makeRig(changes: object = {}): Rig {

@@ -2,7 +2,7 @@ import { setImmediate as turn } from 'node:timers/promises'
 import type { Result } from '../contract/result'
 import type { Rig } from '../contract/rig'
 import { SOFTWARE } from '../contract/software'
-import { makeSolve } from '../engine/solveRig'
+import { makeSolve, type RunField } from '../engine/solveRig'
 
 /** Time for which a solve holds its process before it lets others in [ms]. */
 const SLICE = 30
@@ -11,6 +11,8 @@ const FIRST_STEPS = 64
 export interface SliceOptions {
   /** Keeps the field at every cell and step. */
   full?: boolean
+  /** Keeps what it takes to look into the field afterwards. */
+  field?: boolean
   /** Told after each slice how many of the steps are done. */
   onProgress?: (step: number, steps: number) => void
   /** Heard after each slice; once aborted, the solve rejects with its reason. */
@@ -19,8 +21,11 @@ export interface SliceOptions {
   atOnce?: <T>(action: () => T) => T
 }
 
-/** The result; or the step after which the numbers were no longer finite, which is a fault of ours. */
-export type SliceOutcome = { result: Result } | { brokenAfter: number; steps: number }
+/**
+ * The result, with the field where it was asked for; or the step after which the numbers were no longer
+ * finite, which is a fault of ours.
+ */
+export type SliceOutcome = { result: Result; field: RunField | null } | { brokenAfter: number; steps: number }
 
 /**
  * Solves a rig in slices, so that its process stays answerable, and completes the result with what the
@@ -34,7 +39,7 @@ export type SliceOutcome = { result: Result } | { brokenAfter: number; steps: nu
 export async function solveInSlices(
   rig: Rig,
   sha256: string,
-  { full = false, onProgress, signal, atOnce = (action) => action() }: SliceOptions = {},
+  { full = false, field = false, onProgress, signal, atOnce = (action) => action() }: SliceOptions = {},
 ): Promise<SliceOutcome> {
   let spent = 0
   const spend = <T>(action: () => T): T => {
@@ -44,7 +49,7 @@ export async function solveInSlices(
     return value
   }
 
-  const solve = spend(() => atOnce(() => makeSolve(rig, { full })))
+  const solve = spend(() => atOnce(() => makeSolve(rig, { full, field })))
   let count = FIRST_STEPS
   while (solve.step < solve.steps && !solve.broken) {
     const before = spent
@@ -60,6 +65,7 @@ export async function solveInSlices(
   await turn()
   signal?.throwIfAborted()
   return {
+    field: solve.field,
     result: {
       ...answers,
       rig: { ...about, sha256 },
