@@ -3,10 +3,12 @@ import type { Governing, SectionPeaks, SensePeak } from '../../../src-main/contr
 
 /** The governing margin with the peak that it is of. */
 export interface GoverningPeak extends Governing {
-  section: number
-  /** Section of the line that it stands in. */
+  /** Of the section that it stands in. */
   row: SectionPeaks
   peak: SensePeak
+  /** Where [m] and when [s] the stress that it is taken of is reached. */
+  at: number
+  time: number
 }
 
 /**
@@ -21,5 +23,7 @@ export function findGoverningPeak({
 }: Pick<PageResult, 'governing' | 'sections'>): GoverningPeak | null {
   if (!governing) return null
   const row = sections.find((it) => it.bar === governing.bar && it.section === governing.section)
-  return row ? { ...governing, row, peak: row[governing.sense] } : null
+  if (!row) return null
+  const peak = row[governing.sense]
+  return { ...governing, row, peak, at: peak.localAt, time: peak.localTime }
 }

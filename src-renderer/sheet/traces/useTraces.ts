@@ -42,7 +42,7 @@ export function useTraces(): {
     fromT: view.fromT.value,
     toT: view.toT.value,
     times: ruler.value.ticks.major.map((value) => value * ruler.value.size),
-    governing: (run.result.value && findGoverningPeak(run.result.value)?.peak.time) ?? null,
+    governing: (run.result.value && findGoverningPeak(run.result.value)?.time) ?? null,
     inks: inks.value,
     units: view.units.value,
   }))

@@ -4,7 +4,23 @@ import type { FrameSpec, Plot } from '../../../src-renderer/sheet/charts/frameSp
 import { makeInks } from '../../../src-renderer/sheet/charts/inks'
 import { SvgContext } from '../../../src-renderer/sheet/charts/svg/svgContext'
 
-const inks = makeInks(() => '#102030', 'light', false, 11)
+const grey = '#102030'
+const inks = makeInks(
+  {
+    theme: 'light',
+    paper: '#ffffff',
+    drawer: grey,
+    ink: grey,
+    unit: grey,
+    stale: grey,
+    rule: grey,
+    grid: grey,
+    accent: grey,
+    wash: grey,
+  },
+  false,
+  11,
+)
 
 function makeSpec(changes: Partial<FrameSpec> = {}): FrameSpec {
   return {

@@ -1,0 +1,31 @@
+import type { Layout } from '../../stores/makeLayout'
+
+/** Where the margin, its facts and the cautions stand [px]. */
+export interface MarginPlace {
+  figureWidth: number
+  height: number
+  factsLeft: number
+  factsWidth: number
+  /** Of a line of text. */
+  row: number
+}
+
+/** Room under the margin for the verbs of the traces [px]. */
+const VERBS = 14
+
+/**
+ * Places the margin and what stands beside it, over the traces.
+ *
+ * @param layout - of the sheet
+ */
+export function placeMargin({ line, strip, rightLeft, rightWidth, type }: Layout): MarginPlace {
+  const figureWidth = Math.round(type.margin * 2.5)
+  const factsLeft = rightLeft + figureWidth + 12
+  return {
+    figureWidth,
+    height: Math.min(strip.top - VERBS - line.top - 8, type.margin + 2 * type.body + 24),
+    factsLeft,
+    factsWidth: rightLeft + rightWidth - factsLeft,
+    row: type.body + 4,
+  }
+}
