@@ -1,6 +1,7 @@
 import type { PageResult } from '../../../src-main/contract/bridge'
 import { formatQuantity } from '../../format/formatQuantity'
 import type { UnitSystem } from '../../format/units'
+import { findGoverningPeak } from '../margin/governingPeak'
 import type { GoverningMark } from './draw/fieldModel'
 
 /**
@@ -12,18 +13,16 @@ import type { GoverningMark } from './draw/fieldModel'
  * @returns null without a margin
  */
 export function describeGoverning(result: PageResult, units: UnitSystem): GoverningMark | null {
-  const { governing, sections } = result
-  const section =
-    governing && sections.find((it) => it.bar === governing.bar && it.section === governing.section)
-  if (!governing || !section) return null
-  const { at, time, peak, local, kt } = section[governing.sense]
+  const governing = findGoverningPeak(result)
+  if (!governing) return null
+  const { peak, local, kt } = governing.peak
   const write = (value: number): string => formatQuantity(value, 'stress', units, { digits: 3 }).text
   const { unit } = formatQuantity(local, 'stress', units)
-  const isLocal = kt !== null && Math.abs(local) > Math.abs(peak) * (1 + 1e-9)
+  const isAtFillet = kt !== null && Math.abs(local) > Math.abs(peak) * (1 + 1e-9)
   return {
-    x: at,
-    t: time,
-    text: isLocal ? `${write(local)} ${unit} at the fillet` : `${write(peak)} ${unit}`,
+    x: governing.at,
+    t: governing.time,
+    text: isAtFillet ? `${write(local)} ${unit} at the fillet` : `${write(peak)} ${unit}`,
     over: governing.margin < 0,
   }
 }

@@ -21,6 +21,6 @@ export function listKey(result: PageResult, quantity: Quantity, contacts: readon
     key.push(`fronts under ${WEAKEST_FRONT} are left out`)
   }
   if (contacts.length > 0) key.push('thick bar: the contact carries force')
-  if (quantity === 'stress' && isOverAnywhere(result.sections)) key.push('hatched: over the allowable')
+  if (quantity === 'stress' && isOverAnywhere(result)) key.push('hatched: over the allowable')
   return key
 }

@@ -47,18 +47,17 @@ export function makeFieldImage(picture: FieldPicture, paint: FieldPaint): ImageD
   const { columns, rows, request, result } = picture
   const bytes = new Uint8ClampedArray(4 * columns * rows)
   const table = findTable(request.quantity, paint.theme, paint.stale)
-  const limits = request.quantity === 'stress' ? makeLimits(picture, result.sections, paint) : null
+  const limits = request.quantity === 'stress' ? makeLimits(picture, result, paint) : null
   paintField(picture, table, paint.limit, new Uint32Array(bytes.buffer), limits)
   return new ImageData(bytes, columns, rows)
 }
 
 function makeLimits(
   { request, columns }: FieldPicture,
-  sections: PageResult['sections'],
+  result: PageResult,
   { ink, density }: FieldPaint,
-): Limits | null {
-  const limits = readLimits(sections)
-  if (limits.length === 0) return null
+): Limits {
+  const limits = readLimits(result)
   const [r, g, b] = [1, 3, 5].map((at) => Number.parseInt(ink.slice(at, at + 2), 16))
   return {
     ...spreadLimits(limits, request.fromX, request.toX, columns),
@@ -71,12 +70,11 @@ function makeLimits(
 /**
  * Tells whether stress is anywhere over what its section may bear.
  *
- * @param sections - of a result
+ * @param result - of a run
  */
-export function isOverAnywhere(sections: PageResult['sections']): boolean {
-  const limits = readLimits(sections)
-  return sections.some(({ tension, compression }, i) => {
-    const limit = limits[i]
-    return limit !== undefined && (tension.peak > limit.high || compression.peak < limit.low)
-  })
+export function isOverAnywhere(result: Pick<PageResult, 'sections' | 'factorOfSafety'>): boolean {
+  const limits = readLimits(result)
+  return result.sections.some(
+    ({ tension, compression }, i) => tension.peak > limits[i].high || compression.peak < limits[i].low,
+  )
 }

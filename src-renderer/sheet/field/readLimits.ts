@@ -12,30 +12,21 @@ export interface SectionLimit {
 }
 
 /**
- * Lists what each section may bear: allowable over the factor of safety. The factor is taken back from a
- * margin, `factor = allowable / ((1 + margin) |local|)`.
+ * Lists what each section may bear: allowable over the factor of safety.
  *
- * @param sections - of a result
- * @returns a limit for each section; none where no margin was reckoned
+ * @param result - of a run
+ * @returns a limit for each section
  */
-export function readLimits(sections: PageResult['sections']): SectionLimit[] {
-  const factor = findFactor(sections)
-  if (factor === null) return []
+export function readLimits({
+  sections,
+  factorOfSafety,
+}: Pick<PageResult, 'sections' | 'factorOfSafety'>): SectionLimit[] {
   return sections.map(({ from, to, tension, compression }) => ({
     from,
     to,
-    high: tension.allowable === null ? Infinity : tension.allowable / factor,
-    low: compression.allowable === null ? -Infinity : -compression.allowable / factor,
+    high: tension.allowable === null ? Infinity : tension.allowable / factorOfSafety,
+    low: compression.allowable === null ? -Infinity : -compression.allowable / factorOfSafety,
   }))
-}
-
-function findFactor(sections: PageResult['sections']): number | null {
-  for (const section of sections) {
-    for (const { allowable, margin, local } of [section.tension, section.compression]) {
-      if (allowable !== null && margin !== null) return allowable / ((1 + margin) * Math.abs(local))
-    }
-  }
-  return null
 }
 
 /**

@@ -41,7 +41,8 @@ type Eye = keyof typeof EYES
 
 function see(eye: Eye, rgb: Rgb): Rgb {
   const light = toLinear(rgb)
-  const seen = EYES[eye].map((row) => row.reduce((sum, weight, i) => sum + weight * light[i], 0))
+  const rows: readonly (readonly number[])[] = EYES[eye]
+  const seen = rows.map((row) => row.reduce((sum, weight, i) => sum + weight * light[i], 0))
   return toOklab(toLinear(fromLinear(seen as unknown as Rgb)))
 }
 
