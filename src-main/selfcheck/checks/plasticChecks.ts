@@ -6,7 +6,10 @@ import { ROUND_STEEL } from '../setups'
 
 const MODULUS = 200e9
 const BILINEAR = { ...ROUND_STEEL, yield: '400 MPa', hardening: '10 GPa' }
-/** Stress behind the plastic front of 60 m/s, and beyond the place where the release has met it [Pa]. */
+/**
+ * Stress behind the plastic front of 60 m/s, and beyond the place where the release has met it: there an elastic
+ * wave from (FULL, 60 m/s) meets a plastic one that starts from yield at 30 m/s [Pa]. Only their middle is used.
+ */
 const [FULL, CUT] = [847.213595e6, 701e6]
 
 const drivePlastic = (bench: Bench, speed: number) => {
