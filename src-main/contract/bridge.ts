@@ -1,4 +1,5 @@
 import type { Fault } from './fault'
+import type { Inspection } from './inspection'
 import type { EnergyTable, EnvelopeTable, FieldTable, GaugeTable, Result } from './result'
 import type { LineDrawing } from './lineDrawing'
 
@@ -62,8 +63,8 @@ export interface SolveRequest {
  * or broken by a fault of the program.
  */
 export type SolveAnswer =
-  | { status: 'solved'; result: PageResult; line: LineDrawing }
-  | { status: 'refused'; faults: Fault[] }
+  | { status: 'solved'; result: PageResult; line: LineDrawing; inspection: Inspection }
+  | { status: 'refused'; faults: Fault[]; inspection: Inspection }
   | { status: 'stopped' }
   | { status: 'broken'; message: string }
 

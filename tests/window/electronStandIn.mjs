@@ -4,12 +4,21 @@
  * can be loaded in Chromium. It opens no window and confines nothing: it shows wiring, not safety.
  */
 import { createServer } from 'node:http'
+import { serialize } from 'node:v8'
 
 let servePage = null
 const channels = new Map()
 const nothing = () => {}
 
-export const app = { enableSandbox: nothing, on: nothing, quit: nothing, whenReady: async () => {} }
+export const app = {
+  enableSandbox: nothing,
+  on: nothing,
+  quit: nothing,
+  whenReady: async () => {},
+  // No list of recent files is kept: there is no such folder.
+  getPath: () => '/nowhere',
+}
+export const dialog = {}
 export const protocol = { registerSchemesAsPrivileged: nothing }
 export const Menu = { buildFromTemplate: nothing, setApplicationMenu: nothing }
 export const ipcMain = { handle: (name, answer) => channels.set(name, answer) }
@@ -28,14 +37,18 @@ export const session = {
 export class BrowserWindow {
   constructor({ webPreferences }) {
     this.preload = webPreferences.preload
+    this.webContents = {}
   }
   once() {}
+  on() {}
   async loadURL(address) {
     const server = createServer(async (request, response) => {
       if (request.method === 'POST') {
         const { channel, message } = JSON.parse(Buffer.concat(await request.toArray()).toString())
         const frame = { url: address, parent: null }
-        response.end(JSON.stringify(await channels.get(channel)({ senderFrame: frame }, message)))
+        const event = { senderFrame: frame, sender: this.webContents }
+        // Between Electron's processes values are cloned as these bytes are, arrays and all.
+        response.end(serialize(await channels.get(channel)(event, message)))
         return
       }
       const answer = await servePage({ method: request.method, url: new URL(request.url, address).href })

@@ -1,6 +1,7 @@
 import { spawn, type ChildProcess } from 'node:child_process'
 import { cpSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs'
 import { join } from 'node:path'
+import { deserialize } from 'node:v8'
 import { chromium, type Browser } from 'playwright-core'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { NOTICE } from '../../src-main/contract/notice'
@@ -50,9 +51,10 @@ describe.skipIf(!canPack || !executablePath)(`the packed window, its main proces
       if (message.type() === 'error') complaints.push(message.text())
     })
     page.on('pageerror', (error) => complaints.push(error.message))
-    await page.exposeFunction('sendToMain', async (channel: string, message: unknown) =>
-      (await fetch(site, { method: 'POST', body: JSON.stringify({ channel, message }) })).json(),
-    )
+    await page.exposeFunction('sendToMain', async (channel: string, message: unknown) => {
+      const answer = await fetch(site, { method: 'POST', body: JSON.stringify({ channel, message }) })
+      return deserialize(new Uint8Array(await answer.arrayBuffer())) as unknown
+    })
     await page.addInitScript(`((require) => {${readFileSync(opened.preload, 'utf8')}})(() => ({
       contextBridge: { exposeInMainWorld: (name, value) => { window[name] = value } },
       ipcRenderer: { invoke: (channel, message) => window.sendToMain(channel, message) },

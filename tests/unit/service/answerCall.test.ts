@@ -1,34 +1,45 @@
-import { describe, expect, it } from 'vitest'
-import type { Bridge } from '../../../src-main/contract/bridge'
-import { answerCall } from '../../../src-main/service/answerCall'
+import { describe, expect, it, vi } from 'vitest'
+import type { DocumentFiles } from '../../../src-main/contract/bridge'
+import { answerCall, type CallOwners } from '../../../src-main/service/answerCall'
+import { Refusal } from '../../../src-main/service/refusal'
 
 const about = { name: 'Barwright', version: '1', notice: 'careful' }
-const service: Bridge = {
+const service = {
   about: async () => about,
-  solve: async (text) => {
-    if (text === 'broken') throw new Error('the step is not finite')
-    return { status: 'refused', faults: [{ code: 'not-json', path: '', message: text }] }
+  stop: vi.fn(async () => {}),
+  report: async (slot: string) => {
+    throw slot === 'none' ? new Refusal('no run is kept') : new Error('the step is not finite')
   },
-}
+} as unknown as CallOwners['service']
+const files = { save: vi.fn(async () => {}) } as unknown as DocumentFiles
 
 describe('answerCall', () => {
   it('hands the arguments to the method and its value back', async () => {
-    expect(await answerCall(service, { method: 'about', args: [] })).toEqual({
+    expect(await answerCall({ service, files: null }, { method: 'about', args: [] })).toEqual({
       reply: { value: about },
       status: 'done',
     })
-    const { reply } = await answerCall(service, { method: 'solve', args: ['given text'] })
-    expect(reply).toMatchObject({ value: { faults: [{ message: 'given text' }] } })
+    await answerCall({ service, files: null }, { method: 'stop', args: ['sheet'] })
+    expect(service.stop).toHaveBeenCalledExactlyOnceWith('sheet')
   })
 
   it('says why a message is refused', async () => {
-    const { reply, status } = await answerCall(service, { method: 'erase', args: [] })
+    const { reply, status } = await answerCall({ service, files: null }, { method: 'erase', args: [] })
     expect(status).toBe('refused')
     expect(reply).toEqual({ error: expect.stringContaining('no method') as string })
   })
 
-  it('never rejects: a fault of the program is told as one', async () => {
-    expect(await answerCall(service, { method: 'solve', args: ['broken'] })).toEqual({
+  it("hands what is about files to the host's own, where it has any", async () => {
+    const message = { method: 'files.save', args: ['file:1', '{}'] }
+    expect((await answerCall({ service, files }, message)).status).toBe('done')
+    expect(files.save).toHaveBeenCalledExactlyOnceWith('file:1', '{}')
+    expect(await answerCall({ service, files: null }, message)).toMatchObject({ status: 'refused' })
+  })
+
+  it('never rejects: a reason that the user can mend is told as it is, a fault of the program as one', async () => {
+    const report = (slot: string) => answerCall({ service, files }, { method: 'report', args: [slot] })
+    expect(await report('none')).toEqual({ reply: { error: 'no run is kept' }, status: 'refused' })
+    expect(await report('one')).toEqual({
       reply: { error: 'A fault of the program: the step is not finite' },
       status: 'fault',
     })

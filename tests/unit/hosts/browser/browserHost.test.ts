@@ -4,14 +4,18 @@ import { connect } from 'node:net'
 import { networkInterfaces, tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { BRIDGE_TEXT_LIMIT } from '../../../../src-main/contract/bridge'
+import { BRIDGE_TEXT_LIMIT, type BridgeReply } from '../../../../src-main/contract/bridgeCall'
 import { NOTICE } from '../../../../src-main/contract/notice'
+import { unpackReply } from '../../../../src-main/contract/packReply'
+import type { SolveAnswer } from '../../../../src-main/contract/bridge'
+import { PIN_RIG } from '../../workers/pinRig'
 import { startBrowserHost, type BrowserHost } from '../../../../src-main/hosts/browser/startBrowserHost'
 
 interface Answer {
   status: number
   headers: IncomingHttpHeaders
   text: string
+  bytes: Buffer
 }
 
 let bundleFolder: string
@@ -42,18 +46,22 @@ function ask(
     const sent = request({ host: '127.0.0.1', port, method, path, headers }, (response) => {
       const parts: Buffer[] = []
       response.on('data', (part: Buffer) => parts.push(part))
-      response.on('end', () =>
+      response.on('end', () => {
+        const bytes = Buffer.concat(parts)
         resolve({
           status: response.statusCode ?? 0,
           headers: response.headers,
-          text: Buffer.concat(parts).toString(),
-        }),
-      )
+          text: bytes.toString(),
+          bytes,
+        })
+      })
     })
     sent.on('error', reject)
     sent.end(body)
   })
 }
+
+const unpack = ({ bytes }: Answer): BridgeReply => unpackReply(Uint8Array.from(bytes).buffer)
 
 const ownPage = (): OutgoingHttpHeaders => ({
   Origin: `http://127.0.0.1:${port}`,
@@ -82,9 +90,33 @@ describe('the browser host', () => {
   })
 
   it('answers the bridge to its own page', async () => {
-    const { status, text } = await ask('POST', '/bridge', ownPage(), aboutCall)
-    expect(status).toBe(200)
-    expect(JSON.parse(text)).toMatchObject({ value: { name: 'Barwright', notice: NOTICE } })
+    const answer = await ask('POST', '/bridge', ownPage(), aboutCall)
+    expect(answer.status).toBe(200)
+    expect(answer.headers['content-type']).toBe('application/octet-stream')
+    expect(unpack(answer)).toMatchObject({ value: { name: 'Barwright', notice: NOTICE } })
+  })
+
+  it('solves in a worker, answers others meanwhile, and carries the arrays as bytes', async () => {
+    const post = (method: string, ...args: unknown[]) =>
+      ask('POST', '/bridge', ownPage(), JSON.stringify({ method, args }))
+    const request = { slot: 's', text: JSON.stringify(PIN_RIG), name: 'pin.rig.json', coarse: false }
+    const [solved, about] = await Promise.all([post('solve', request), post('about')])
+    expect(about.status).toBe(200)
+    const { value } = unpack(solved) as { value: Extract<SolveAnswer, { status: 'solved' }> }
+    expect(value.result.envelope.tension).toBeInstanceOf(Float64Array)
+    const window = { fromX: 0, toX: 0.4, fromT: 0, toT: 1e-4, columns: 3, rows: 2 }
+    const tile = unpack(await post('readField', { slot: 's', quantity: 'velocity', ...window }))
+    expect((tile as { value: Float32Array }).value).toHaveLength(12)
+    const missing = await post('report', 'other')
+    expect([missing.status, unpack(missing)]).toEqual([
+      400,
+      { error: expect.stringMatching(/^No run/) as string },
+    ])
+  })
+
+  it('opens and saves no files: the page of a browser has ways of its own', async () => {
+    const body = JSON.stringify({ method: 'files.save', args: ['file:1', '{}'] })
+    expect((await ask('POST', '/bridge', ownPage(), body)).status).toBe(400)
   })
 
   it.each([
@@ -128,9 +160,9 @@ describe('the browser host', () => {
     ['an unknown method', JSON.stringify({ method: 'erase', args: [] })],
     ['no text for text', JSON.stringify({ method: 'solve', args: [7] })],
   ])('refuses a message with %s, in words', async (_what, body) => {
-    const { status, text } = await ask('POST', '/bridge', ownPage(), body)
-    expect(status).toBe(400)
-    expect(JSON.parse(text)).toEqual({ error: expect.stringMatching(/\w+ \w+/) as string })
+    const answer = await ask('POST', '/bridge', ownPage(), body)
+    expect(answer.status).toBe(400)
+    expect(unpack(answer)).toEqual({ error: expect.stringMatching(/\w+ \w+/) as string })
   })
 
   it('does not read a body over its limit, whether announced or not', async () => {

@@ -1,8 +1,9 @@
 import { EventEmitter } from 'node:events'
-import { mkdtempSync, rmSync, writeFileSync } from 'node:fs'
+import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest'
+import type { RigText } from '../../../../src-main/contract/bridge'
 import { NOTICE } from '../../../../src-main/contract/notice'
 import { BRIDGE_CHANNEL } from '../../../../src-main/contract/bridgeChannel'
 import type { ElectronRecorder } from './electronRecorder'
@@ -17,6 +18,7 @@ beforeAll(async () => {
   writeFileSync(join(bundleFolder, 'index.html'), '<title>page</title>')
   writeFileSync(join(bundleFolder, 'index.js'), 'x')
   electron = (await import('electron')) as unknown as ElectronRecorder
+  electron.app.getPath.mockReturnValue(bundleFolder)
   const { startDesktop } = await import('../../../../src-main/hosts/desktop/startDesktop')
   await startDesktop({ bundleFolder, preload: '/built/preload.cjs' })
 })
@@ -57,7 +59,16 @@ describe('the window', () => {
   it('has no menu entry that leads to the network', () => {
     const template = electron.Menu.buildFromTemplate.mock.calls[0][0] as { role: string }[]
     expect(electron.Menu.setApplicationMenu).toHaveBeenCalledWith(template)
-    expect(template.map(({ role }) => role)).not.toContain('help')
+    expect(JSON.stringify(template)).not.toMatch(/help|http/)
+  })
+
+  it('may stand beside others, each with its own files', () => {
+    const [file] = electron.Menu.buildFromTemplate.mock.calls[0][0] as {
+      submenu: { label?: string; click?: () => void }[]
+    }[]
+    file.submenu.find(({ label }) => label === 'New window')?.click?.()
+    expect(electron.windows).toHaveLength(2)
+    expect(electron.windows[1].options).toEqual(electron.windows[0].options)
   })
 })
 
@@ -162,7 +173,7 @@ describe('the channel', () => {
       (event: object, message: unknown) => Promise<unknown>,
     ]
     expect(channel).toBe(BRIDGE_CHANNEL)
-    return handler({ senderFrame }, message)
+    return handler({ senderFrame, sender: electron.windows[0].webContents }, message)
   }
   const page = { url: 'barwright://app/', parent: null }
 
@@ -184,7 +195,21 @@ describe('the channel', () => {
 
   it('checks the arguments', async () => {
     expect(await call(page, { method: 'solve', args: [{}] })).toEqual({
-      error: '"solve" takes text only.',
+      error: 'Argument 1 of "solve".slot must be text.',
     })
+  })
+
+  it("reaches the window's own files", async () => {
+    const path = join(bundleFolder, 'made.rig.json')
+    writeFileSync(path, '{}')
+    electron.dialog.showOpenDialog.mockResolvedValueOnce({ canceled: false, filePaths: [path] })
+    const opened = (await call(page, { method: 'files.open', args: [] })) as { value: RigText }
+    expect(opened.value).toMatchObject({ name: 'made.rig.json', text: '{}' })
+    expect(electron.dialog.showOpenDialog.mock.calls[0][0]).toBe(electron.windows[0])
+    expect(await call(page, { method: 'files.save', args: [path, '{"a":1}'] })).toMatchObject({
+      error: expect.stringContaining('not chosen') as string,
+    })
+    await call(page, { method: 'files.save', args: [opened.value.place, '{"a":1}'] })
+    expect(readFileSync(path, 'utf8')).toBe('{"a":1}')
   })
 })

@@ -3,7 +3,18 @@ import { vi } from 'vitest'
 
 /** What the desktop host asked of `electron`, recorded by a stand-in; it draws nothing and confines nothing. */
 export interface ElectronRecorder {
-  app: EventEmitter & { enableSandbox: unknown; whenReady: () => Promise<void>; quit: unknown }
+  app: EventEmitter & {
+    enableSandbox: unknown
+    whenReady: () => Promise<void>
+    quit: unknown
+    getPath: ReturnType<typeof vi.fn>
+  }
+  dialog: {
+    showOpenDialog: ReturnType<typeof vi.fn>
+    showSaveDialog: ReturnType<typeof vi.fn>
+    showMessageBox: ReturnType<typeof vi.fn>
+    showErrorBox: ReturnType<typeof vi.fn>
+  }
   ipcMain: { handle: ReturnType<typeof vi.fn> }
   Menu: { buildFromTemplate: ReturnType<typeof vi.fn>; setApplicationMenu: ReturnType<typeof vi.fn> }
   protocol: { registerSchemesAsPrivileged: ReturnType<typeof vi.fn> }
@@ -23,7 +34,9 @@ export interface RecordedSession extends EventEmitter {
   protocol: { handle: ReturnType<typeof vi.fn> }
 }
 
-export interface RecordedWindow {
+export interface RecordedWindow extends EventEmitter {
+  webContents: object
+  destroy: ReturnType<typeof vi.fn>
   options: { webPreferences: Record<string, unknown> }
   loaded: string[]
 }
@@ -41,6 +54,8 @@ export function makeElectronRecorder(): ElectronRecorder {
   class BrowserWindow extends EventEmitter {
     loaded: string[] = []
     show = vi.fn()
+    destroy = vi.fn()
+    webContents = {}
     constructor(public options: RecordedWindow['options']) {
       super()
       order.push('window')
@@ -59,11 +74,18 @@ export function makeElectronRecorder(): ElectronRecorder {
     app: Object.assign(new EventEmitter(), {
       enableSandbox: note('sandbox'),
       quit: vi.fn(),
+      getPath: vi.fn(() => '/nowhere'),
       whenReady: () => {
         order.push('ready')
         return Promise.resolve()
       },
     }),
+    dialog: {
+      showOpenDialog: vi.fn(async () => ({ canceled: true, filePaths: [] })),
+      showSaveDialog: vi.fn(async () => ({ canceled: true, filePath: '' })),
+      showMessageBox: vi.fn(async () => ({ response: 2 })),
+      showErrorBox: vi.fn(),
+    },
     ipcMain: { handle: note('channel') },
     Menu: { buildFromTemplate: vi.fn((template: unknown) => template), setApplicationMenu: vi.fn() },
     protocol: { registerSchemesAsPrivileged: note('scheme') },
