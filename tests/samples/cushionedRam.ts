@@ -60,9 +60,9 @@ export function describeCushionedRam(): void {
 
     it('feels nothing of the pad across an open gap', () => {
       const gap = 0.6e-3
-      const withGap = solveSample('cushioned-ram', (text) =>
-        text.replace('"damping": "3 kN s/m"', '"damping": "3 kN s/m", "gap": "0.6 mm"'),
-      )
+      const withGap = solveSample('cushioned-ram', {
+        edit: (text) => text.replace('"damping": "3 kN s/m"', '"damping": "3 kN s/m", "gap": "0.6 mm"'),
+      })
       const { timeStep } = withGap.solution.run
       expect(Math.abs(withGap.solution.joints[0].closedFrom! - gap / speed)).toBeLessThan(2 * timeStep)
       // The pad presses as before, only later: the force of one step is what the closing inside a step costs.
@@ -72,7 +72,7 @@ export function describeCushionedRam(): void {
     it('keeps its margin in proportion to the speed', () => {
       const { margin } = solution.governing!
       expectClose(solution.striker!.safeSpeed!, speed * (1 + margin))
-      const faster = solveSample('cushioned-ram', (text) => text.replace('"3 m/s"', '"6 m/s"'))
+      const faster = solveSample('cushioned-ram', { edit: (text) => text.replace('"3 m/s"', '"6 m/s"') })
       expectClose(faster.solution.governing!.margin + 1, (margin + 1) / 2, 1e-10)
       expectShown(readme, solution.striker!.safeSpeed!, 'm/s')
     })

@@ -84,9 +84,9 @@ export function describeDropHammerShaft(): void {
     it('uses up its margin at the safe speed, which a drop of v^2 / 2g gives', () => {
       const drop = solution.striker!.safeSpeed! ** 2 / (2 * 9.80665)
       expectShown(readme, drop, 'm')
-      const at = solveSample('drop-hammer-shaft', (text) => text.replace('"0.6 m"', `"${drop} m"`))
+      const at = solveSample('drop-hammer-shaft', { edit: (text) => text.replace('"0.6 m"', `"${drop} m"`) })
       expect(Math.abs(at.solution.governing!.margin)).toBeLessThan(1e-12)
-      const higher = solveSample('drop-hammer-shaft', (text) => text.replace('"0.6 m"', '"1.2 m"'))
+      const higher = solveSample('drop-hammer-shaft', { edit: (text) => text.replace('"0.6 m"', '"1.2 m"') })
       expect(higher.solution.cautions.map(({ code }) => code)).toContain('negative-margin')
       expectClose(higher.solution.governing!.margin, (solution.governing!.margin + 1) / Math.SQRT2 - 1)
     })

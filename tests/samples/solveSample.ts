@@ -20,18 +20,24 @@ export interface Sample {
   readme: string
 }
 
+export interface SampleOptions {
+  edit?: (text: string) => string
+  method?: Rig['run']['method']
+}
+
 /**
  * Solves a sample the way every host does, with the records that lie beside it.
  * @param name of the sample's folder
- * @param edit changes the text of its rig first
+ * @param options edit: changes the text of its rig first; method: in place of its own
  */
-export function solveSample(name: string, edit = (text: string) => text): Sample {
+export function solveSample(name: string, options: SampleOptions = {}): Sample {
+  const { edit = (text: string) => text, method } = options
   const read = readRigFile(join(samplesFolder, name, `${name}.rig.json`))
   if ('faults' in read) throw new Error(JSON.stringify(read.faults))
-  const { rig, faults } = readRig(edit(read.file.text), { readRecord: read.file.readRecord })
+  const { rig, faults } = readRig(edit(read.file.text), { readRecord: read.file.readRecord, method })
   if (rig === null) throw new Error(JSON.stringify(faults))
   const solve = makeSolve(rig)
-  solve.advance(solve.steps)
+  while (solve.step < solve.steps && !solve.broken) solve.advance(solve.steps)
   if (solve.broken) throw new Error(`${name} stopped being finite after step ${solve.step}`)
   return { rig, solution: solve.finish(), readme: readReadme(name) }
 }

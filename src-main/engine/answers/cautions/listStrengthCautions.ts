@@ -1,5 +1,5 @@
 import type { Caution, SectionPeaks } from '../../../contract/result'
-import type { Section } from '../../../contract/rig'
+import type { Material, Section } from '../../../contract/rig'
 import type { Line } from '../../line/line'
 import { describePlace } from '../describePlace'
 import { describeQuantity } from './describeQuantity'
@@ -28,7 +28,7 @@ export function listStrengthCautions(line: Line, sections: SectionPeaks[]): Caut
   return [
     ...listNegativeMargins(rows, line.rig.factorOfSafety),
     ...listOverYield(rows, line.rig.run.method === 'elements'),
-    ...(line.rig.run.finiteStrain ? [] : listLargeStrain(rows)),
+    ...(line.rig.run.finiteStrain ? [] : listLargeStrain(rows, line.rig.run.method === 'elements')),
     ...listNoAllowable(rows),
   ]
 }
@@ -96,11 +96,11 @@ function describeYielding(only: boolean, followed: boolean, byElements: boolean)
     : `${linear} With the hardening of the material given, a run by elements follows it.`
 }
 
-function listLargeStrain(rows: Row[]): Caution[] {
+function listLargeStrain(rows: Row[], byElements: boolean): Caution[] {
   const large = rows
     .map(({ place, source, peaks: { tension, compression } }) => ({
       place,
-      strain: Math.max(tension.peak, -compression.peak) / source.material.modulus,
+      strain: evaluateStrain(source.material, Math.max(tension.peak, -compression.peak), byElements),
     }))
     .filter(({ strain }) => strain > LARGE_STRAIN)
   if (large.length === 0) return []
@@ -114,6 +114,14 @@ function listLargeStrain(rows: Row[]): Caution[] {
       where: joinPlaces(large.map(({ place }) => place)),
     },
   ]
+}
+
+/** Strain under a stress [Pa]; where the run follows yielding, that of the first pull or push past yield. */
+function evaluateStrain(material: Material, stress: number, byElements: boolean): number {
+  const { modulus, yield: limit, hardening } = material
+  const elastic = stress / modulus
+  if (!byElements || limit === null || !hardening || stress <= limit) return elastic
+  return elastic + (stress - limit) * (1 / hardening - 1 / modulus)
 }
 
 function listNoAllowable(rows: Row[]): Caution[] {

@@ -251,6 +251,23 @@ describe('strength', () => {
     expect(codesOf({ leftEnd: press(150e6), bars: bar(section) })).not.toContain('large-strain')
   })
 
+  it('counts the plastic strain where the run follows it', () => {
+    const soft = { ...STEEL, yield: 150e6, hardening: 2e9 }
+    const { line, record } = runPlain({
+      dt,
+      duration: 600e-6,
+      leftEnd: press(200e6),
+      bars: bar({ ...straight, material: soft }),
+    })
+    const by = (method: 'characteristics' | 'elements') => {
+      const rig = { ...line.rig, run: { ...line.rig.run, method } }
+      return find(evaluateCautions({ line: { ...line, rig }, record }), 'large-strain')
+    }
+    // 200 MPa/200 GPa + 50 MPa (1/2 GPa - 1/200 GPa) = 2.575 %.
+    expect(by('elements')!.message).toContain('up to 2.57 %')
+    expect(by('characteristics')).toBeUndefined()
+  })
+
   it('asks for allowables where stress has none', () => {
     const bare = { ...straight, allowable: { tension: null, compression: 300e6 } }
     const caution = find(cautionsOf({ leftEnd: slow, bars: bar(straight, bare) }), 'no-allowable')!
