@@ -3,6 +3,7 @@ import type { SolveAnswer } from '../contract/bridge'
 import type { Result } from '../contract/result'
 import { makeRecordReader } from '../documents/makeRecordReader'
 import { writeReport } from '../documents/report/writeReport'
+import { makeInspection } from '../engine/rig/makeInspection'
 import { readRig } from '../engine/rig/readRig'
 import type { RunField } from '../engine/solveRig'
 import { coarsenRig } from './coarsenRig'
@@ -59,11 +60,13 @@ export async function solveJob(
   watch: { signal: AbortSignal; onProgress: (done: number, of: number) => void },
 ): Promise<Answer & { kept: KeptRun | null }> {
   const none = (value: SolveAnswer) => ({ value, buffers: [], kept: null })
+  const { notes, inspection } = makeInspection()
   const { rig, faults } = readRig(job.text, {
+    notes,
     method: job.method,
     readRecord: job.rigPath === null ? undefined : makeRecordReader(job.rigPath),
   })
-  if (rig === null) return none({ status: 'refused', faults })
+  if (rig === null) return none({ status: 'refused', faults, inspection })
   const sha256 = createHash('sha256').update(job.text).digest('hex')
   try {
     const outcome = await solveInSlices(job.coarse ? coarsenRig(rig) : rig, sha256, { ...watch, field: true })
@@ -75,7 +78,7 @@ export async function solveJob(
       })
     }
     const { result, buffers } = packResult(outcome.result)
-    const value: SolveAnswer = { status: 'solved', result, line: drawLine(rig) }
+    const value: SolveAnswer = { status: 'solved', result, line: drawLine(rig), inspection }
     return { value, buffers, kept: { text: job.text, result: outcome.result, field: outcome.field! } }
   } catch (error) {
     if (watch.signal.aborted) return none({ status: 'stopped' })

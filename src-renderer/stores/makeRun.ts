@@ -1,5 +1,6 @@
 import { ref, shallowRef, watch, type Ref, type ShallowRef } from 'vue'
 import type { Bridge, PageResult, Progress, SolveAnswer } from '../../src-main/contract/bridge'
+import type { Inspection } from '../../src-main/contract/inspection'
 import type { LineDrawing } from '../../src-main/contract/lineDrawing'
 import type { Rig } from './makeRig'
 
@@ -8,6 +9,8 @@ export interface Run {
   /** The last good result; null before the first. */
   result: ShallowRef<PageResult | null>
   line: ShallowRef<LineDrawing | null>
+  /** What the values of the document are worth, as the host read it last; of a refused one as well. */
+  inspection: ShallowRef<Inspection | null>
   /** True where the result does not belong to the document as it stands. */
   stale: Ref<boolean>
   /** What the stale result belongs to, such as `from before: Bore of shaft, section 3`. */
@@ -48,6 +51,7 @@ const PROGRESS_EVERY = 250
 export function makeRun(bridge: Pick<Bridge, 'solve' | 'progress' | 'stop'>, rig: Rig): Run {
   const result = shallowRef<PageResult | null>(null)
   const line = shallowRef<LineDrawing | null>(null)
+  const inspection = shallowRef<Inspection | null>(null)
   const stale = ref(false)
   const staleReason = ref('')
   const coarse = ref(false)
@@ -97,6 +101,7 @@ export function makeRun(bridge: Pick<Bridge, 'solve' | 'progress' | 'stop'>, rig
   }
 
   function take(answer: SolveAnswer, isCoarse: boolean): void {
+    if (answer.status === 'solved' || answer.status === 'refused') inspection.value = answer.inspection
     if (answer.status === 'solved') {
       line.value = answer.line
       result.value = answer.result
@@ -149,6 +154,7 @@ export function makeRun(bridge: Pick<Bridge, 'solve' | 'progress' | 'stop'>, rig
   watch(rig.opened, () => {
     result.value = null
     line.value = null
+    inspection.value = null
     frozen.value = null
     stale.value = false
     trouble.value = ''
@@ -166,6 +172,7 @@ export function makeRun(bridge: Pick<Bridge, 'solve' | 'progress' | 'stop'>, rig
   return {
     result,
     line,
+    inspection,
     stale,
     staleReason,
     coarse,

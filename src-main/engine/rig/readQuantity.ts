@@ -39,6 +39,7 @@ export function readQuantity(
     reading.faults.add(place, faultText.beyondMagnitude(value, largest))
     return null
   }
+  reading.notes?.value(place, fixed, dimension)
   return fixed
 }
 

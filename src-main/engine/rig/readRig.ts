@@ -21,6 +21,7 @@ import { readOptionalQuantity } from './readQuantity'
 import { readRun } from './readRun'
 import { readVariables } from './readVariables'
 import type { Reading, ReadRecord } from './reading'
+import type { RigNotes } from './makeInspection'
 import { makeReading } from './reading'
 
 export interface ReadRigOptions {
@@ -28,6 +29,8 @@ export interface ReadRigOptions {
   readRecord?: ReadRecord
   /** Goes before the method that the file names. */
   method?: RunSettings['method']
+  /** Takes down what the values are worth, also of a rig that is refused. */
+  notes?: RigNotes
 }
 
 /** A checked rig, or every reason why there is none, in the order of the file. */
@@ -45,7 +48,7 @@ export function readRig(text: string, options: ReadRigOptions = {}): RigReading 
   if (document === undefined) return { rig: null, faults: faults.inOrder(document) }
   checkEndAsks(document, faults)
   const form = checkForm(document, faults)
-  const reading = makeReading(faults, options.readRecord ?? null)
+  const reading = makeReading(faults, options.readRecord ?? null, options.notes ?? null)
   const rig = form === null ? null : readForm(reading, form, options.method ?? null)
   if (rig !== null && faults.empty) checkSize(rig, faults)
   if (rig !== null && faults.empty) return { rig, faults: [] }

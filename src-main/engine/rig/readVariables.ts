@@ -47,7 +47,11 @@ export function readVariables(reading: Reading, raw: Record<string, string | num
     return null
   }
 
-  for (const name of names) settle(name)
+  for (const name of names) {
+    settle(name)
+    const known = reading.variables.get(name)
+    if (known) reading.notes?.value(place(name), known.value, known.dimension)
+  }
 }
 
 /** Names in a formula, units and functions among them. */

@@ -4,6 +4,7 @@ import type { FixedValue, FormulaArguments } from './formula/formula'
 import type { FormulaReading } from './formula/readFormula'
 import { isSimpleFormula, readFormula } from './formula/readFormula'
 import { LIMITS } from './limits'
+import type { RigNotes } from './makeInspection'
 
 /** Gives the text of a record beside the rig, or why it cannot be had. */
 export type ReadRecord = (relativePath: string) => string | { refused: string }
@@ -16,14 +17,21 @@ export interface Reading {
   /** Reads a formula within the budget of the file. */
   formula(text: string, args: FormulaArguments): FormulaReading
   readRecord: ReadRecord | null
+  /** What was read is noted here; null where nobody asks. */
+  notes: RigNotes | null
 }
 
 /**
  * Makes what the readers of one file share.
  * @param faults list that they report to
  * @param readRecord access to the records beside the rig; null where there is none
+ * @param notes of what was read; null where nobody asks
  */
-export function makeReading(faults: FaultList, readRecord: ReadRecord | null): Reading {
+export function makeReading(
+  faults: FaultList,
+  readRecord: ReadRecord | null,
+  notes: RigNotes | null = null,
+): Reading {
   const variables = new Map<string, FixedValue | null>()
   const known = new Map<string, FormulaReading>()
   let budget: number = LIMITS.formulaTotal
@@ -31,6 +39,7 @@ export function makeReading(faults: FaultList, readRecord: ReadRecord | null): R
     faults,
     variables,
     readRecord,
+    notes,
     formula(text, args) {
       if (isSimpleFormula(text)) return readFormula(text, { variables, arguments: args })
       const key = `${args} ${text}`

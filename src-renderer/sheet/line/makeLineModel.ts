@@ -88,10 +88,13 @@ export function placeCautions(
 ): Map<string, number[]> {
   const places = new Map<string, number[]>()
   for (const [index, { where }] of cautions.entries()) {
-    const model =
-      models.find(({ barName, section }) => where === `${barName}, section ${section.index + 1}`) ??
-      models.find(({ barName }) => where === barName)
-    if (model) places.set(model.path, [...(places.get(model.path) ?? []), index + 1])
+    const named = where.split('; ')
+    for (const { path, barName, section } of models) {
+      const whole = section.index === 0 && named.includes(barName)
+      const name = `${barName}, section ${section.index + 1}`
+      if (!whole && !named.some((one) => one === name || one.startsWith(`${name} (`))) continue
+      places.set(path, [...(places.get(path) ?? []), index + 1])
+    }
   }
   return places
 }

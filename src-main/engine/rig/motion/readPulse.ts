@@ -39,10 +39,20 @@ export function readPulse(
   dimension: DimensionName,
   runDuration: number | null,
 ): Pulse | null {
-  if (form === undefined) return null
+  if (form === undefined || form.shape === undefined) return null
+  const pulse = readShape(reading, place, form, dimension, runDuration)
+  if (pulse !== null) reading.notes?.pulse(place, pulse, dimension, runDuration)
+  return pulse
+}
+
+function readShape(
+  reading: Reading,
+  place: Place,
+  form: PulseForm,
+  dimension: DimensionName,
+  runDuration: number | null,
+): Pulse | null {
   switch (form.shape) {
-    case undefined:
-      return null
     case 'formula':
       return readFormulaPulse(reading, [...place, 'formula'], form.formula, dimension, runDuration)
     case 'table': {
