@@ -16,7 +16,10 @@ const THRESHOLD = 0.01
  * @returns the pulses by start, rightgoing first; `clear` where the opposite wave stays at or under the
  *   threshold all through
  */
-export function findGaugePulses(trace: PlaceTrace, dt: number): GaugePulse[] {
+export function findGaugePulses(
+  trace: Pick<PlaceTrace, 'rightgoing' | 'leftgoing'>,
+  dt: number,
+): GaugePulse[] {
   const threshold = THRESHOLD * Math.max(evaluateLargest(trace.rightgoing), evaluateLargest(trace.leftgoing))
   if (threshold === 0) return []
   return [

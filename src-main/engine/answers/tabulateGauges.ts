@@ -5,7 +5,7 @@ import { evaluateBridge } from './evaluateBridge'
 import { findGaugePulses } from './findGaugePulses'
 
 /**
- * Makes the table of each gauge: stress `F/A`, strain `F/(E A)`, the two directional waves, bridge
+ * Makes the table of each gauge: stress `F/A`, strain, the two directional waves, bridge
  * volts and the pulses that pass.
  *
  * @param traces in the order of the rig's gauges
@@ -14,7 +14,7 @@ export function tabulateGauges(line: Line, traces: readonly PlaceTrace[]): Gauge
   return line.rig.gauges.map(({ name, bridge }, i) => {
     const trace = traces[i]
     const force = Array.from(trace.force)
-    const strain = force.map((F) => F / (trace.modulus * trace.area))
+    const strain = Array.from(trace.strain)
     return {
       name,
       x: trace.x,

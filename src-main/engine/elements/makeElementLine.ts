@@ -1,11 +1,13 @@
 import type { Material, RunSettings } from '../../contract/rig'
 import type { Line } from '../line/line'
 
-/** Share of the elastic limit kept where finite compression makes the material stiffer. */
-const FINITE_STRAIN_SHARE = 0.7
+/** Share of the elastic limit kept where finite compression makes the material stiffer: enough for a stretch of about 0.75. */
+const FINITE_STRAIN_SHARE = 0.5
 
 /** Linear bulk viscosity of an explicit run, as a share of rho c h (common practice). */
 export const LINEAR_BULK = 0.06
+/** Largest jump of velocity over one element for which the quadratic part is kept stable, as a share of c. */
+const LARGEST_JUMP = 0.1
 /** Quadratic bulk viscosity (common practice). */
 export const QUADRATIC_BULK = 1.2
 
@@ -30,5 +32,5 @@ export function makeElementLine(line: Line): Line {
 /** Damping ratio of an element's highest mode, omega = 2 c / h. */
 function evaluateDamping(material: Material, run: RunSettings, h: number, c: number): number {
   const viscous = ((material.viscosity ?? 0) * c) / (material.modulus * h)
-  return viscous + (run.bulkViscosity ? LINEAR_BULK : 0)
+  return viscous + (run.bulkViscosity ? LINEAR_BULK + QUADRATIC_BULK ** 2 * LARGEST_JUMP : 0)
 }

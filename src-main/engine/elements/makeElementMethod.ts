@@ -112,6 +112,10 @@ function finish(piece: Piece, k: number, beat: Beat, keep: boolean): void {
     forceRight: right.force[k],
     keep,
   })
+  for (const watch of piece.strains) {
+    watch.strain[k] = watch.now
+    watch.now += (beat.dt * (elementKernel.v[watch.to] - elementKernel.v[watch.from])) / watch.length
+  }
   for (const probe of piece.probes) {
     const now = elementKernel.v[piece.first + probe.position]
     probe.velocity[k] = evaluateWorking(beat, now, probe.velocity[k])

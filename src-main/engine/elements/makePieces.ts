@@ -60,6 +60,7 @@ export function makePieces(
         .slice(1, -1)
         .map((j) => makeStepFaces(start + j, elementMass[j - 1] / 2, elementMass[j] / 2, loads)),
       probes: [],
+      strains: [],
       loads,
     }
   })

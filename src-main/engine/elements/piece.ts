@@ -13,6 +13,21 @@ export interface NodeProbe {
   velocity: Float64Array
 }
 
+/** Watches the strain of the one or two elements of a section beside a node. */
+export interface StrainProbe {
+  /** Node of the piece, and the span it is seen from. */
+  position: number
+  span: number
+  /** Slots of the nodes between which it is taken, and their distance [m]. */
+  from: number
+  to: number
+  length: number
+  /** Strain after the latest step. */
+  now: number
+  /** Shape (steps + 1). */
+  strain: Float64Array
+}
+
 /** A force of the surroundings at an inner node. */
 export interface NodeLoad {
   /** Slot of the node. */
@@ -112,5 +127,6 @@ export interface Piece {
   /** At each face between its spans. */
   faces: StepFaces[]
   probes: NodeProbe[]
+  strains: StrainProbe[]
   loads: NodeLoad[]
 }

@@ -1,3 +1,4 @@
+import { evaluateInitial } from '../line/evaluateInitial'
 import type { Line } from '../line/line'
 import type { MethodRun, SpanTrace } from '../march/methodRun'
 import { WIDENING } from '../march/widening'
@@ -90,6 +91,7 @@ export function makeElementReader(line: Line, pieces: readonly Piece[], enter: (
     addProbe(span, position) {
       const { piece, node, face } = seat(span, position)
       const inner = node > 0 && node < piece.last - piece.first
+      watchStrain(line, piece, span, position)
       if (!inner || piece.probes.some((probe) => probe.position === node && probe.face === face)) return
       const count = line.steps + 1
       const [force, velocity] = [new Float64Array(count), new Float64Array(count)]
@@ -97,9 +99,10 @@ export function makeElementReader(line: Line, pieces: readonly Piece[], enter: (
     },
     readTrace(span, position): SpanTrace {
       const { piece, node, face } = seat(span, position)
-      if (node === 0) return piece.left
-      if (node === piece.last - piece.first) return piece.right
-      return piece.probes.find((probe) => probe.position === node && probe.face === face)!
+      const strain = piece.strains.find((one) => one.position === node && one.span === span)?.strain
+      if (node === 0) return { ...piece.left, strain }
+      if (node === piece.last - piece.first) return { ...piece.right, strain }
+      return { ...piece.probes.find((probe) => probe.position === node && probe.face === face)!, strain }
     },
     readNode(node) {
       const joint = line.bars.some((bar) => bar.lastSpan + 1 === node)
@@ -115,4 +118,23 @@ export function makeElementReader(line: Line, pieces: readonly Piece[], enter: (
     },
     listFragments: () => [],
   }
+}
+
+/** Watches the strain at a position of a span: the mean over the elements beside it in that span. */
+function watchStrain(line: Line, piece: Piece, span: number, position: number): void {
+  const { cells, from: start, to: end, source, area } = line.spans[span]
+  const node = piece.spanStart[span - piece.firstSpan] + position
+  if (piece.strains.some((one) => one.position === node && one.span === span)) return
+  const [before, after] = [position > 0 ? 1 : 0, position < cells ? 1 : 0]
+  const slot = piece.first + node
+  const force = evaluateInitial(line, span, position).force
+  piece.strains.push({
+    position: node,
+    span,
+    from: slot - before,
+    to: slot + after,
+    length: ((before + after) * (end - start)) / cells,
+    now: force / (source.material.modulus * area[position]),
+    strain: new Float64Array(line.steps + 1),
+  })
 }

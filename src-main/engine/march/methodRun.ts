@@ -28,6 +28,8 @@ export interface SpanExtremes {
 export interface SpanTrace {
   force: Float64Array
   velocity: Float64Array
+  /** Strain there, du/dx; left out where it is F/(E A). */
+  strain?: Float64Array
 }
 
 /** The motion and the force on both sides of a node at every step, shape (steps + 1) each. */

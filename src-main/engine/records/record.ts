@@ -25,6 +25,8 @@ export interface PlaceTrace {
   modulus: number
   /** [N] */
   force: Float64Array
+  /** du/dx; F/(E A) where the bar is linear. */
+  strain: Float64Array
   /** [m/s] */
   velocity: Float64Array
   /** Directional waves f = (F - Z v)/2 and g = (F + Z v)/2 [N]. */

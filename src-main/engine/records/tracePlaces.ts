@@ -57,7 +57,8 @@ export function traceGauge(run: MethodRun, gauge: Gauge): PlaceTrace {
     impedance: Z,
     modulus: material.modulus,
   }
-  const { force, velocity } = share > 0 ? blend(here, there, share) : here
+  const { force, velocity, strain } = share > 0 ? blend(here, there, share) : here
+  const stiffness = material.modulus * area
   const count = line.steps + 1
   const rightgoing = new Float64Array(count)
   const leftgoing = new Float64Array(count)
@@ -69,11 +70,22 @@ export function traceGauge(run: MethodRun, gauge: Gauge): PlaceTrace {
   }
   const fall = line.rig.gravity * line.dt
   const ground = fall === 0 ? velocity : velocity.map((v, k) => v + fall * k)
-  return { ...trace, force, velocity: ground, rightgoing, leftgoing }
+  return {
+    ...trace,
+    force,
+    strain: strain ?? force.map((F) => F / stiffness),
+    velocity: ground,
+    rightgoing,
+    leftgoing,
+  }
 }
 
 /** The trace a share of the way between two positions. */
 function blend(here: SpanTrace, there: SpanTrace, share: number): SpanTrace {
   const mix = (from: Float64Array, to: Float64Array) => from.map((a, k) => a + share * (to[k] - a))
-  return { force: mix(here.force, there.force), velocity: mix(here.velocity, there.velocity) }
+  return {
+    force: mix(here.force, there.force),
+    velocity: mix(here.velocity, there.velocity),
+    strain: here.strain && there.strain && mix(here.strain, there.strain),
+  }
 }

@@ -1,6 +1,7 @@
 import type { Quantity } from '../../../contract/bridge'
 import { evaluateLeastSquare } from './evaluateLeastSquare'
 import { type Reach, reachNodes, type Strip, type Tile, widenPixel } from './pixels'
+import { seen } from './seen'
 import { findColumn, findRow, type SampledSpan } from './sampleField'
 
 /**
@@ -32,13 +33,10 @@ export function drawSamples(
     const G = (fall * (row.from + row.to)) / 2
     for (const x of xs) {
       lookAtSamples(sampled, window.quantity, x.reach, reach, G)
-      widenPixel(values, row.index * window.columns + x.index, seen.low, seen.high)
+      widenPixel(values, row.index * window.columns + x.index, seen[0], seen[1])
     }
   }
 }
-
-/** Extremes of what was looked at last; one object, so that a pixel allocates nothing. */
-const seen = { low: 0, high: 0 }
 
 function lookAtSamples(sampled: SampledSpan, quantity: Quantity, x: Reach, t: Reach, G: number): void {
   const { columns, force, velocity, places } = sampled
@@ -48,14 +46,17 @@ function lookAtSamples(sampled: SampledSpan, quantity: Quantity, x: Reach, t: Re
     for (let column = x.from; column <= x.to; column++) {
       const i = row * columns + column
       const { area, impedance: Z, modulus } = places[column]
-      let [bottom, top] = [0, 0]
+      let bottom = 0
+      let top = 0
       if (quantity === 'velocity') {
         bottom = velocity.low[i] + G
         top = velocity.high[i] + G
       } else if (quantity === 'energy') {
         const share = 1 / (2 * modulus * area * area)
-        const [F0, F1] = [force.low[i], force.high[i]]
-        const [V0, V1] = [Z * (velocity.low[i] + G), Z * (velocity.high[i] + G)]
+        const F0 = force.low[i]
+        const F1 = force.high[i]
+        const V0 = Z * (velocity.low[i] + G)
+        const V1 = Z * (velocity.high[i] + G)
         bottom = share * (evaluateLeastSquare(F0, F1) + evaluateLeastSquare(V0, V1))
         top = share * (Math.max(F0 * F0, F1 * F1) + Math.max(V0 * V0, V1 * V1))
       } else {
@@ -67,6 +68,6 @@ function lookAtSamples(sampled: SampledSpan, quantity: Quantity, x: Reach, t: Re
       if (top > high) high = top
     }
   }
-  seen.low = low
-  seen.high = high
+  seen[0] = low
+  seen[1] = high
 }

@@ -1,9 +1,13 @@
+import { chooseLooks, lookAtDiamondSquares, lookAtDiamondSums } from './lookAtDiamonds'
+import { lookAtNodeSquares, lookAtNodeSums } from './lookAtNodes'
 import { reachNodes, type Strip, type Tile, widenPixel } from './pixels'
+import { seen } from './seen'
 import type { SpanPlace } from './spanPlace'
-import { chooseLooks, lookAtDiamonds, lookAtNodes, type Mix, seen, type WaveSpan } from './waveSpan'
+import type { WaveSpan } from './waveSpan'
 
-/** Levels at most: diamonds of about a million steps. */
-const MOST_LEVELS = 20
+/** Diamonds of less than 2^2 steps cost more than looking at each node, of more than 2^20 gain nothing. */
+const LEAST_LEVEL = 2
+const MOST_LEVEL = 20
 
 /**
  * Draws a span with known waves into a tile: every value that the run had at a position and a step, the
@@ -24,36 +28,47 @@ export function drawWaves(
   fall: number,
 ): void {
   const { quantity } = window
-  const level = Math.min(chooseLevel(columns), chooseLevel(rows), MOST_LEVELS)
-  const size = level > 0 ? 2 ** level : 0
-  const cut = (end: number) => (strip: Strip) => ({
-    ...strip,
-    inside: level > 0 && strip.from >= size && strip.to <= end - size,
-    // With those of the diamonds whose middles lie in it: a pixel beside it may leave them out.
-    nodes: reachNodes({ from: strip.from - size / 2, to: strip.to + size / 2 }, (at) => at, end + 1),
-    looks: chooseLooks(strip.from, strip.to, level),
-  })
-  const xs = columns.map(cut(span.cells))
-  const ts = rows.map(cut(span.steps))
+  const level = chooseLevel(columns, rows)
+  const xs = columns.map((strip) => cutStrip(strip, span.cells, level))
+  const ts = rows.map((strip) => cutStrip(strip, span.steps, level))
   const { area, impedance: Z, modulus } = place
   const share = { stress: 1 / area, force: 1, velocity: 1 / Z, energy: 1 / (modulus * area * area) }[quantity]
-  const mix: Mix = { sign: quantity === 'velocity' ? -1 : quantity === 'energy' ? 0 : 1, h: 0 }
+  const sign = quantity === 'velocity' ? -1 : 1
 
   for (const t of ts) {
     const G = (fall * (t.from + t.to)) / 2
     const shift = quantity === 'velocity' ? G : 0
-    mix.h = (Z * G) / 2
+    const h = (Z * G) / 2
     for (const x of xs) {
-      if (x.inside && t.inside) lookAtDiamonds(span, x.looks, t.looks, level, mix)
-      else lookAtNodes(span, x.nodes, t.nodes, mix)
+      const rough = x.inside && t.inside
+      if (quantity === 'energy') {
+        if (rough) lookAtDiamondSquares(span, x.looks, t.looks, level, h)
+        else lookAtNodeSquares(span, x.first, x.last, t.first, t.last, h)
+      } else if (rough) lookAtDiamondSums(span, x.looks, t.looks, level, sign)
+      else lookAtNodeSums(span, x.first, x.last, t.first, t.last, sign)
       const at = t.index * window.columns + x.index
-      widenPixel(values, at, share * seen.low + shift, share * seen.high + shift)
+      widenPixel(values, at, share * seen[0] + shift, share * seen[1] + shift)
     }
   }
 }
 
-/** The largest diamonds that fit twice into a pixel; 0 where pixels see so little that each node is looked at. */
-function chooseLevel(strips: readonly Strip[]): number {
-  const widest = Math.max(...strips.map(({ from, to }) => to - from))
-  return widest < 4 ? 0 : Math.floor(Math.log2(widest / 2))
+/** The largest diamonds that fit twice into a pixel; 0 where each node is looked at. */
+function chooseLevel(columns: readonly Strip[], rows: readonly Strip[]): number {
+  const widest = (strips: readonly Strip[]) => Math.max(...strips.map(({ from, to }) => to - from))
+  const level = Math.floor(Math.log2(Math.min(widest(columns), widest(rows)) / 2))
+  return level < LEAST_LEVEL ? 0 : Math.min(level, MOST_LEVEL)
+}
+
+/** A strip with its nodes and its looks; the nodes those of the diamonds too whose middles lie in it. */
+function cutStrip(strip: Strip, end: number, level: number) {
+  const size = level > 0 ? 2 ** level : 0
+  const wide = { from: strip.from - size / 2, to: strip.to + size / 2 }
+  const nodes = reachNodes(wide, (at) => at, end + 1)
+  return {
+    ...strip,
+    first: nodes.from,
+    last: nodes.to,
+    inside: level > 0 && strip.from >= size && strip.to <= end - size,
+    looks: chooseLooks(strip.from, strip.to, level),
+  }
 }

@@ -3,14 +3,14 @@ import { tabulateGauges } from '../../../../src-main/engine/answers/tabulateGaug
 import { marchElements, marchRig } from '../march'
 import { makeBar, makePulse, makeRig, makeSection, ROUND_STEEL } from '../testRig'
 
-/** A rod whose left end is pushed at a steady speed; a gauge in it and one on its struck face. */
+/** A rod whose left end comes to a steady speed within 20 us; a gauge in it and one on its struck face. */
 function makePushedRig(speed: number, hardening: number | null) {
   const material = { ...ROUND_STEEL, yield: 400e6, hardening }
   const rig = makeRig(
     [makeBar('rod', [makeSection(0.5, 1e-4, { material })])],
     { duration: 80e-6, cell: 0.0005 },
     {
-      leftEnd: { kind: 'velocity', pulse: makePulse(() => speed) },
+      leftEnd: { kind: 'velocity', pulse: makePulse((t) => speed * Math.min(1, t / 20e-6)) },
       gauges: [
         { name: 'inside', bar: 0, at: 0.02, bridge: null },
         { name: 'face', bar: 0, at: 0, bridge: null },
@@ -26,8 +26,8 @@ describe('the strain of a gauge', () => {
     // at 60 m/s 0.0467213595 (section 13 of the published values; von Karman and Duwez 1950, from memory).
     const { line, record } = marchElements(makePushedRig(60, 10e9))
     for (const { strain } of tabulateGauges(line, record.gauges)) {
-      // 1 %: the plastic front is spread over some elements and rings a little behind.
-      expect(Math.abs(strain[strain.length - 1] + 0.0467213595)).toBeLessThan(0.0467213595 * 0.01)
+      // 0.3 %: the front rises over some elements and rings a little behind; seen 0.2 %.
+      expect(Math.abs(strain[strain.length - 1] + 0.0467213595)).toBeLessThan(0.0467213595 * 0.003)
     }
   })
 
