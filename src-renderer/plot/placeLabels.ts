@@ -52,6 +52,12 @@ function isInside(box: Box, room: Box): boolean {
   return box.left >= room.left && box.right <= room.right && box.top >= room.top && box.bottom <= room.bottom
 }
 
-function isOver(one: Box, other: Box): boolean {
+/**
+ * Tells whether two areas share a pixel.
+ *
+ * @param one - an area
+ * @param other - another
+ */
+export function isOver(one: Box, other: Box): boolean {
   return one.left < other.right && other.left < one.right && one.top < other.bottom && other.top < one.bottom
 }

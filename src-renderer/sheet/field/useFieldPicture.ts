@@ -24,6 +24,18 @@ const MOST_PIXELS = 2.4e6
 /** The whole run in few cells: their extremes are those of the run. */
 const OVERVIEW = { columns: 48, rows: 48 }
 
+/** Largest magnitude of a quantity in a run. */
+interface Largest {
+  result: PageResult
+  quantity: Quantity
+  magnitude: number
+}
+
+interface Fetched {
+  picture: FieldPicture
+  most: Largest
+}
+
 /** What the field shows. */
 export interface FieldPictures {
   /** The last picture that the host gave; null without a result. */
@@ -47,24 +59,19 @@ export const useFieldPicture: () => FieldPictures = shareByRun(() => {
   const picture = shallowRef<FieldPicture | null>(null)
   const trouble = ref('')
   /** Largest magnitude in the run of the quantity that the picture shows. */
-  const largest = shallowRef<{ quantity: Quantity; magnitude: number } | null>(null)
+  const largest = shallowRef<Largest | null>(null)
 
-  async function fetch({
-    request,
-    result,
-  }: {
-    request: FieldRequest
-    result: PageResult
-  }): Promise<FieldPicture> {
-    const whole = isWhole(request)
+  async function fetch({ request, result }: { request: FieldRequest; result: PageResult }): Promise<Fetched> {
+    const { quantity } = request
+    const last = largest.value
+    const known = last?.result === result && last.quantity === quantity ? last : null
     const [values, overview] = await Promise.all([
       bridge.readField(request),
-      whole ? null : readOverview(request),
+      known || isWhole(request) ? null : readOverview(request),
     ])
-    const answer = { request, result, columns: request.columns, rows: request.rows, values }
-    const { low, high } = findExtremes(overview ?? answer)
-    largest.value = { quantity: request.quantity, magnitude: Math.max(-low, high) }
-    return answer
+    const grid = { columns: request.columns, rows: request.rows, values }
+    const most = known ?? { result, quantity, magnitude: findMagnitude(overview ?? grid) }
+    return { picture: { ...grid, request, result }, most }
   }
 
   async function readOverview(request: FieldRequest): Promise<FieldGrid> {
@@ -79,7 +86,9 @@ export const useFieldPicture: () => FieldPictures = shareByRun(() => {
     fetch,
     (answer) => {
       trouble.value = ''
-      if (answer.result === run.result.value) picture.value = answer
+      if (answer.picture.result !== run.result.value) return
+      picture.value = answer.picture
+      largest.value = answer.most
     },
     (reason) => (trouble.value = reason instanceof Error ? reason.message : String(reason)),
   )
@@ -130,3 +139,8 @@ export const useFieldPicture: () => FieldPictures = shareByRun(() => {
   })
   return { picture, limit, trouble }
 })
+
+function findMagnitude(grid: FieldGrid): number {
+  const { low, high } = findExtremes(grid)
+  return Math.max(-low, high)
+}

@@ -1,12 +1,12 @@
 import { drawHaloText } from '../../../plot/haloText'
 import { placeLabels, type Box } from '../../../plot/placeLabels'
 import { drawFronts } from './drawFronts'
+import { drawKey } from './drawKey'
+import { FONT } from './font'
 import { CHAIN, DOTS, drawLevels, drawUprights } from './drawLines'
 import type { FieldModel } from './fieldModel'
 import type { FieldScales } from './fieldScales'
 import { listFrontLabels, listFrontLines } from './listFrontLabels'
-
-export const FONT = '"IBM Plex Sans Condensed", sans-serif'
 
 /** Half the width of the bar that stands for a contact that carries force [px]. */
 const CONTACT = 2.5
@@ -63,9 +63,9 @@ export function drawField(context: CanvasRenderingContext2D, model: FieldModel, 
   drawContacts(context, model, scales, ink)
 
   const taken = [...drawGoverning(context, model, scales, ink), ...drawGauges(context, model, scales, ink)]
-  const keyBox = measureKey(context, model, scales)
+  const keyBox = drawKey(context, model, scales, taken)
   context.font = `400 ${model.axisSize}px ${FONT}`
-  const labels = listFrontLabels(fronts, (text) => context.measureText(text).width, model.axisSize)
+  const labels = listFrontLabels(fronts, (text) => context.measureText(text).width, model.axisSize, height)
   const room = { left: 2, top: 2, right: width - 2, bottom: height - 2 }
   for (const label of placeLabels(labels, room, [...taken, keyBox])) {
     drawHaloText(context, label.text, label.x, label.y, {
@@ -74,7 +74,6 @@ export function drawField(context: CanvasRenderingContext2D, model: FieldModel, 
       halo: palette.paper,
     })
   }
-  drawKey(context, model, scales)
 }
 
 function drawSigns(
@@ -173,34 +172,5 @@ function drawGauges(
     const left = at + 4 + wide < width - 2 ? at + 4 : at - 4 - wide
     drawHaloText(context, gauge.name, left, y, { font, ink, halo: palette.paper, align: 'left' })
     return [{ left: left - 2, top: y - axisSize / 2 - 2, right: left + wide + 2, bottom: height }]
-  })
-}
-
-/** Where the key stands: the lower right corner, above the names of gauges. */
-function measureKey(
-  context: CanvasRenderingContext2D,
-  model: FieldModel,
-  { width, height }: FieldScales,
-): Box {
-  context.font = `400 ${model.axisSize}px ${FONT}`
-  const wide = Math.max(0, ...model.key.map((text) => context.measureText(text).width))
-  const bottom = height - model.axisSize - 12
-  return {
-    left: width - wide - 14,
-    top: bottom - model.key.length * (model.axisSize + 3),
-    right: width,
-    bottom,
-  }
-}
-
-function drawKey(context: CanvasRenderingContext2D, model: FieldModel, scales: FieldScales): void {
-  const { top } = measureKey(context, model, scales)
-  model.key.forEach((text, i) => {
-    drawHaloText(context, text, scales.width - 10, top + (i + 0.5) * (model.axisSize + 3), {
-      font: `400 ${model.axisSize}px ${FONT}`,
-      ink: model.palette.unit,
-      halo: model.palette.paper,
-      align: 'right',
-    })
   })
 }

@@ -20,11 +20,16 @@ export interface FrontLine {
 export const WEAKEST_FRONT = 0.05
 
 /** Most fronts that are drawn at once. */
-const MOST_FRONTS = 400
+const MOST_FRONTS = 300
 
 /** Share of the first front under which a front bears no number, and the length on the screen it needs [px]. */
-const WEAKEST_LABEL = 0.15
+const WEAKEST_LABEL = 0.2
 const LEAST_LENGTH = 72
+
+/** Most numbers, and the clear space about each [px]. */
+const MOST_LABELS = 28
+const CLEAR_ACROSS = 24
+const CLEAR_UPRIGHT = 6
 
 /** Where along its line a number may stand, best first. */
 const PLACES = [0.5, 0.36, 0.64, 0.24, 0.76]
@@ -34,7 +39,7 @@ const PLACES = [0.5, 0.36, 0.64, 0.24, 0.76]
  *
  * @param fronts - of a result
  * @param scales - of the field
- * @returns lines in pixels, at most 400, none weaker than a twentieth of the first front
+ * @returns lines in pixels, at most 300, none weaker than a twentieth of the first front
  */
 export function listFrontLines(fronts: readonly Wavefront[], scales: FieldScales): FrontLine[] {
   const lines: FrontLine[] = []
@@ -55,15 +60,18 @@ export function listFrontLines(fronts: readonly Wavefront[], scales: FieldScales
 
 /**
  * Makes the numbers of the fronts: their force relative to the first one, such as `+0.38`. Of fronts that
- * repeat each other on one course, as in a striker that rings, the first bears the number.
+ * repeat each other on one course, as in a striker that rings, the first bears the number. Strong and early
+ * fronts come before weak and late ones.
  *
  * @param lines - the strongest first
  * @param measure - width of a text [px]
- * @param height - of a line of text [px]
+ * @param lineHeight - of a line of text [px]
+ * @param height - of the field [px]
  */
 export function listFrontLabels(
   lines: readonly FrontLine[],
   measure: (text: string) => number,
+  lineHeight: number,
   height: number,
 ): Label[] {
   const told = new Set<string>()
@@ -73,15 +81,22 @@ export function listFrontLabels(
       const name = `${course} ${writeShare(force)}`
       return !told.has(name) && told.add(name)
     })
+    .sort((one, other) => weigh(other, height) - weigh(one, height))
+    .slice(0, MOST_LABELS)
     .map(({ force, x1, y1, x2, y2 }) => {
       const text = writeShare(force)
       return {
         text,
-        width: measure(text) + 8,
-        height: height + 4,
+        width: measure(text) + CLEAR_ACROSS,
+        height: lineHeight + CLEAR_UPRIGHT,
         places: PLACES.map((share) => ({ x: x1 + (x2 - x1) * share, y: y1 + (y2 - y1) * share })),
       }
     })
+}
+
+/** Strength of a front, of one on the upper edge two fifths. */
+function weigh({ force, y1, y2 }: FrontLine, height: number): number {
+  return Math.abs(force) * (0.4 + (0.3 * (y1 + y2)) / height)
 }
 
 /**

@@ -45,7 +45,7 @@ describe('fronts', () => {
       ],
       scales,
     )
-    const labels = listFrontLabels(lines, measure, 11)
+    const labels = listFrontLabels(lines, measure, 11, 400)
     expect(labels.map(({ text }) => text)).toEqual(['+1.00', '+1.00'])
     // The middle of the front that starts at 0.1 ms: 0.15 ms up.
     expect(labels.map(({ places }) => places[0].y)).toEqual([340, 340])
