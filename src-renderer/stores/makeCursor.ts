@@ -76,8 +76,8 @@ function findGoverningPoint({ governing, sections }: PageResult): { x: number; t
   const ofMargin =
     governing && sections.find((it) => it.bar === governing.bar && it.section === governing.section)
   if (governing && ofMargin) {
-    const { at, time } = ofMargin[governing.sense]
-    return { x: at, t: time }
+    const { localAt, localTime } = ofMargin[governing.sense]
+    return { x: localAt, t: localTime }
   }
   const peaks = sections.flatMap(({ tension, compression }) => [tension, compression])
   if (peaks.length === 0) return null
