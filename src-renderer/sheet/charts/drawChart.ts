@@ -16,7 +16,7 @@ export function drawChart(picture: SvgContext, spec: FrameSpec, left: number, to
   picture.setOrigin(left, top)
   const canvas = { width: spec.width, height: spec.height, getContext: () => picture }
   picture.canvas = canvas
-  const config = makeFrameConfig(spec, 1)
+  const config = makeFrameConfig({ spec }, 1)
   for (const dataset of config.data.datasets) {
     // With a `segment` the line is stroked by plain calls, not by a Path2D that no picture can read.
     dataset.segment = {}

@@ -9,10 +9,14 @@ type Point = { x: number; y: number }
  * Turns a chart's description into what Chart.js takes. Nothing is left to its own layout: the plot is the
  * canvas less the margins that were asked for, so that axes agree with those of other views to the pixel.
  *
- * @param spec - the chart
+ * @param shown - the chart; its marks are drawn from what it holds at the time
  * @param pixelRatio - pixels of the screen per pixel of the page
  */
-export function makeFrameConfig(spec: FrameSpec, pixelRatio: number): ChartConfiguration<'line', Point[]> {
+export function makeFrameConfig(
+  shown: { spec: FrameSpec },
+  pixelRatio: number,
+): ChartConfiguration<'line', Point[]> {
+  const { spec } = shown
   const { pads, upright } = spec
   return {
     type: 'line',
@@ -37,7 +41,7 @@ export function makeFrameConfig(spec: FrameSpec, pixelRatio: number): ChartConfi
         annotation: { clip: true, annotations: spec.annotations },
       },
     },
-    plugins: [makeMarks(spec)],
+    plugins: [makeMarks(shown)],
   }
 }
 
@@ -125,11 +129,12 @@ function makeFill(colour: string | ColourStops) {
 }
 
 /** What charts do not know, and the frame around the plot. */
-function makeMarks(spec: FrameSpec): Plugin<'line'> {
+function makeMarks(shown: { spec: FrameSpec }): Plugin<'line'> {
   return {
     id: 'marks',
-    beforeDatasetsDraw: ({ ctx }) => inPlot(spec, ctx, spec.below),
+    beforeDatasetsDraw: ({ ctx }) => inPlot(shown.spec, ctx, shown.spec.below),
     afterDatasetsDraw: ({ ctx }) => {
+      const { spec } = shown
       inPlot(spec, ctx, spec.above)
       const { area } = makePlot(spec, ctx)
       ctx.save()

@@ -31,7 +31,7 @@ export async function saveFigure(figure: Figure, name: string, form: 'png' | 'sv
   context.fillRect(0, 0, figure.width, figure.height)
   drawFigure(context, figure, ({ spec, left, top }) => {
     const own = document.createElement('canvas')
-    const chart = startChart(own, spec, SHARPNESS)
+    const chart = startChart(own, { spec }, SHARPNESS)
     context.drawImage(own, left, top, spec.width, spec.height)
     chart.destroy()
   })

@@ -11,12 +11,16 @@ export type RunningChart = Chart<'line', { x: number; y: number }[]>
  * Draws a chart.
  *
  * @param canvas - drawn on; it takes the chart's size
- * @param spec - the chart
+ * @param shown - the chart
  * @param pixelRatio - pixels of the screen per pixel of the page
  * @returns the chart, to be destroyed by its owner
  */
-export function startChart(canvas: HTMLCanvasElement, spec: FrameSpec, pixelRatio: number): RunningChart {
-  canvas.width = spec.width
-  canvas.height = spec.height
-  return new Chart(canvas, makeFrameConfig(spec, pixelRatio))
+export function startChart(
+  canvas: HTMLCanvasElement,
+  shown: { spec: FrameSpec },
+  pixelRatio: number,
+): RunningChart {
+  canvas.width = shown.spec.width
+  canvas.height = shown.spec.height
+  return new Chart(canvas, makeFrameConfig(shown, pixelRatio))
 }

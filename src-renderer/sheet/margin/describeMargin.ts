@@ -21,8 +21,10 @@ export interface MarginWords {
   place: string
   /** Where and when. */
   at: Fact[]
-  /** Stress, and what is allowed. */
-  stress: Fact[]
+  /** Stress without its sign, such as `326`. */
+  stress: string
+  /** What is allowed, such as `of 467 MPa (700 ÷ 1.5)`. */
+  limit: string
   /** Factor of the fillet that it counts; empty without one. */
   fillet: string
 }
@@ -51,18 +53,11 @@ export function describeMargin(result: PageResult, units: UnitSystem): MarginWor
       { before: 'x', ...formatQuantity(at, 'length', units, { trim: true }) },
       { before: 't', ...formatQuantity(time, 'time', units, { digits: 3 }) },
     ],
-    stress: [
-      { text: whole(Math.abs(local)), unit: '' },
-      ...(allowable === null
-        ? []
-        : [
-            {
-              before: 'of',
-              text: whole(allowable / factor),
-              unit: `${name} (${whole(allowable)} ÷ ${formatNumber(factor, { digits: 3, trim: true })})`,
-            },
-          ]),
-    ],
+    stress: whole(Math.abs(local)),
+    limit:
+      allowable === null
+        ? name
+        : `of ${whole(allowable / factor)} ${name} (${whole(allowable)} ÷ ${formatNumber(factor, { digits: 3, trim: true })})`,
     fillet:
       kt !== null && Math.abs(local) > Math.abs(peak.peak) * (1 + 1e-9)
         ? `with Kt ${formatNumber(kt, { digits: 3 })} at the fillet`

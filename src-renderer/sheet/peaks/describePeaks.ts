@@ -16,7 +16,7 @@ export function describePeaks(result: PageResult, units: UnitSystem): { head: st
   const { name } = UNITS.stress[units]
   const governing = findGoverningPeak(result)
   const factor = formatNumber(result.factorOfSafety, { digits: 3, trim: true })
-  const head = governing ? [`${name}, with`, `allowable ÷ ${factor}`] : [name]
+  const head = governing ? [`${name}, with`, 'allowable', `÷ ${factor}`] : [name]
   const extremes = (['tension', 'compression'] as const).map((sense) => {
     const largest = Math.max(...result.sections.map((section) => Math.abs(section[sense].peak)))
     const { text, unit } = formatQuantity(largest, 'stress', units)

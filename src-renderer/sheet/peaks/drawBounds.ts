@@ -5,7 +5,7 @@ import type { Inks } from '../charts/inks'
 import type { Bound } from './listBounds'
 
 /** Height of the hatching on the forbidden side [px]. */
-const SIDE = 7
+export const SIDE = 7
 
 /**
  * Hatches the forbidden side of each allowable.

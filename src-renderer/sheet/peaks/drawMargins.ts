@@ -3,6 +3,8 @@ import { formatMargin } from '../../format/formatMargin'
 import { placeLabels, type Box, type Label } from '../../plot/placeLabels'
 import type { Plot } from '../charts/frameSpec'
 import { writeFont, type Inks } from '../charts/inks'
+import { SIDE } from './drawBounds'
+import type { Bound } from './listBounds'
 
 /** The margin of one section in one sense. */
 interface MarginLabel {
@@ -16,8 +18,9 @@ interface MarginLabel {
   sense: 'tension' | 'compression'
 }
 
-/** Room around the words of a label [px]. */
+/** Room around the words of a label, and between the heights that are tried for it [px]. */
 const EDGE = 4
+const ROW = 5
 
 /**
  * Writes the margin of each section, tension above and compression below zero; the governing one boxed and
@@ -25,14 +28,23 @@ const EDGE = 4
  *
  * @param plot - drawn into
  * @param result - of the run
+ * @param bounds - drawn in it, which no margin may cover
  * @param inks - of the drawing
  */
-export function drawMargins(plot: Plot, result: PageResult, inks: Inks): void {
+export function drawMargins(plot: Plot, result: PageResult, bounds: readonly Bound[], inks: Inks): void {
   const { context, x, y, area } = plot
   const labels = listLabels(result).sort(
     (a, b) => Number(b.governs) - Number(a.governs) || Number(b.negative) - Number(a.negative),
   )
-  const taken: Box[] = []
+  const taken: Box[] = bounds.map(({ from, to, stress }) => {
+    const at = y.at(stress)
+    return {
+      left: x.at(from),
+      right: x.at(to),
+      top: at - (stress > 0 ? SIDE : 2),
+      bottom: at + (stress > 0 ? 2 : SIDE),
+    }
+  })
   for (const label of labels) {
     const left = Math.max(area.left, x.at(label.from))
     const right = Math.min(area.right, x.at(label.to))
@@ -44,9 +56,9 @@ export function drawMargins(plot: Plot, result: PageResult, inks: Inks): void {
       const before = name === '' ? 0 : context.measureText(`${name} `).width
       context.font = writeFont(size, label.governs || label.negative ? 600 : 400)
       const width = before + context.measureText(label.figure).width + 2 * EDGE
-      const room = label.governs ? area : { ...area, left, right }
+      const room = label.governs || label.negative ? area : { ...area, left, right }
       const [placed] = placeLabels(
-        [{ text: label.figure, width, height, places: listPlaces(label) }],
+        [{ text: label.figure, width, height, places: listPlaces(label, width) }],
         room,
         taken,
       )
@@ -62,16 +74,18 @@ export function drawMargins(plot: Plot, result: PageResult, inks: Inks): void {
       break
     }
 
-    function listPlaces({ sense, governs }: MarginLabel): Label['places'] {
+    function listPlaces({ sense, governs, negative }: MarginLabel, width: number): Label['places'] {
       const middle = (left + right) / 2
       const zero = Math.min(area.bottom, Math.max(area.top, y.at(0)))
-      const far = sense === 'tension' ? area.top + height / 2 + 10 : area.bottom - height / 2 - 10
-      const half = (far + zero) / 2
-      const rows = [far, far + (half - far) / 2, half, (half + zero) / 2]
-      const columns = governs
-        ? [right + 40, left - 40, middle]
-        : [middle, left + (right - left) / 4, right - (right - left) / 4]
-      return rows.flatMap((row) => columns.map((column) => ({ x: column, y: row })))
+      const far = sense === 'tension' ? area.top + height / 2 + 3 : area.bottom - height / 2 - 3
+      const count = Math.max(1, Math.floor(Math.abs(zero - far) / ROW))
+      const rows = Array.from({ length: count }, (_none, i) => far + Math.sign(zero - far) * ROW * i)
+      const inside = [middle, left + (right - left) / 4, right - (right - left) / 4]
+      const beside = [1, 2, 3].flatMap((n) => [right + n * (width / 2 + EDGE), left - n * (width / 2 + EDGE)])
+      // A negative margin is never left out: where its section is too narrow it stands beside it.
+      const columns = governs || (negative && right - left < width) ? [...beside, middle] : inside
+      if (negative) columns.push(...beside)
+      return columns.flatMap((column) => rows.map((row) => ({ x: column, y: row })))
     }
   }
 }

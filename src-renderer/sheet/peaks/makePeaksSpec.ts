@@ -1,3 +1,4 @@
+import type { AnnotationOptions } from 'chartjs-plugin-annotation'
 import type { PageResult } from '../../../src-main/contract/bridge'
 import { UNITS, type UnitSystem } from '../../format/units'
 import { findEntry, writeColour } from '../../plot/colour/colourMap'
@@ -5,8 +6,8 @@ import { thinTrace } from '../../plot/thinTrace'
 import type { ColourStops, Curve, FrameSpec, Mark, Plot } from '../charts/frameSpec'
 import { writeFont, type Inks } from '../charts/inks'
 import { listMarks } from '../charts/listMarks'
-import { findGoverningPeak } from '../margin/governingPeak'
-import { CHAIN, makeLine } from '../traces/traceFrame'
+import { findGoverningPeak, type GoverningPeak } from '../margin/governingPeak'
+import { CHAIN, makeDimension, makeLine } from '../traces/traceFrame'
 import { drawOver, drawSides, drawStems } from './drawBounds'
 import { drawMargins } from './drawMargins'
 import { findStressRange, listBounds, type Bound } from './listBounds'
@@ -73,6 +74,7 @@ export function makePeaksSpec(result: PageResult, frozen: PageResult | null, fra
     annotations: [
       makeLine({ y: 0 }, inks),
       ...seen.map(({ from, to, stress }) => makeLine({ y: stress, from, to }, inks, { width: 2 })),
+      ...listGap(governing, seen, height / (high - low), inks),
       ...(governing
         ? [makeLine({ x: governing.at }, inks, { dash: CHAIN, width: governing.margin < 0 ? 2 : 1 })]
         : []),
@@ -82,7 +84,7 @@ export function makePeaksSpec(result: PageResult, frozen: PageResult | null, fra
       drawSides(plot, seen, inks)
       drawOver(plot, result, bounds, inks)
       drawStems(plot, result.sections, inks)
-      drawMargins(plot, result, inks)
+      drawMargins(plot, result, seen, inks)
       writeRightBounds(plot, seen, frame)
     },
     inks,
@@ -104,6 +106,23 @@ function writeRightBounds(
     if (to < toX - 1e-9 || atLeft.has(stress)) continue
     context.fillText(writeWhole(stress, units), area.right + 4, y.at(stress))
   }
+}
+
+/** The distance between the governing stress and its allowable, as a dimension line where it has room. */
+function listGap(
+  governing: GoverningPeak | null,
+  seen: Bound[],
+  pixels: number,
+  inks: Inks,
+): AnnotationOptions[] {
+  if (!governing) return []
+  const { local } = governing.peak
+  const bound = seen.find(
+    ({ from, to, stress }) =>
+      stress * local > 0 && governing.row.from >= from - 1e-9 && governing.row.to <= to + 1e-9,
+  )
+  if (!bound) return []
+  return [makeDimension(governing.at, local, bound.stress, '', Math.abs(bound.stress - local) * pixels, inks)]
 }
 
 function listPoints(
@@ -140,7 +159,7 @@ function listStressMarks(
     strong.every((mark) => Math.abs(mark.at - at) * pixels >= CLEAR) &&
     (high - at) * pixels >= CLEAR / 2 &&
     (at - low) * pixels >= CLEAR / 2
-  const wanted = Math.max(2, Math.floor(height / 28))
+  const wanted = Math.max(2, Math.floor(height / 18))
   return [...listMarks(low, high, 'stress', units, wanted).filter(({ at }) => isClear(at)), ...strong]
 }
 

@@ -22,6 +22,8 @@ export interface RatioPair {
 export interface RatioRow extends RatioPair {
   name: string
   strong: boolean
+  /** Whether what is reflected has a sign. */
+  signed: boolean
 }
 
 /**
@@ -49,6 +51,7 @@ function viewStep({ name, x, fromLeft, fromRight }: PageResult['interfaces'][num
   const row = (label: string, quantity: 'Energy' | 'Stress' | 'Force', strong = false): RatioRow => ({
     name: label,
     strong,
+    signed: quantity !== 'Energy',
     fromLeft: readShares(fromLeft, quantity),
     fromRight: readShares(fromRight, quantity),
   })
@@ -97,9 +100,9 @@ function viewTaper({ name, from, to, shortPulse, longPulse }: TaperAnswer): Step
     to,
     isTaper: true,
     rows: [
-      { name: 'energy, long', strong: false, fromLeft: energy, fromRight: energy },
-      { name: 'force, long', strong: true, ...long },
-      { name: 'force, short', strong: true, ...short },
+      { name: 'energy', strong: false, signed: false, fromLeft: energy, fromRight: energy },
+      { name: 'long force', strong: true, signed: true, ...long },
+      { name: 'short force', strong: true, signed: true, ...short },
     ],
     picture: long,
   }

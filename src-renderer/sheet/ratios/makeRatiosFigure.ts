@@ -22,12 +22,12 @@ export function makeRatiosFigure(title: string, step: StepView, inks: Inks): Fig
     { text: title, x: EDGE, y: 20, strong: true, size: inks.size + 3 },
     { text: step.name, x: EDGE, y: 42, strong: true },
   ]
-  step.rows.forEach(({ name, strong, fromLeft, fromRight }, row) => {
+  step.rows.forEach(({ name, strong, signed, fromLeft, fromRight }, row) => {
     const y = 42 + line * (row + 1)
     words.push({ text: name, x: EDGE, y, quiet: true })
     const shares = [fromLeft.reflected, fromLeft.transmitted, fromRight.transmitted, fromRight.reflected]
     shares.forEach((share, i) => {
-      const text = writeShare(share, i === 0 || i === 3)
+      const text = writeShare(share, signed && (i === 0 || i === 3))
       words.push({ text, x: NAMES + (i + 1) * COLUMN, y, strong, align: 'right' })
     })
   })

@@ -25,7 +25,7 @@ export function placeFoot({ peaks, notice, rightLeft, rightWidth, type }: Layout
     top,
     height: notice.top - top,
     ratiosWidth,
-    names: Math.round(type.body * 4.6),
+    names: Math.round(type.body * 4.3),
     titleLeft: rightLeft + ratiosWidth + GAP,
     titleWidth: rightWidth - ratiosWidth - GAP,
   }

@@ -1,4 +1,3 @@
-import { formatQuantity } from '../../format/formatQuantity'
 import type { PulseWindow } from './pulseWindow'
 
 /**
@@ -23,13 +22,13 @@ export function describeWindow(window: PulseWindow | null, end: number): { text:
 }
 
 /**
- * Writes a short time in whole microseconds, or with more digits where it is shorter than ten.
+ * Writes how long something lasts, in the unit that keeps the number short.
  *
  * @param duration - [s]
- * @returns such as `157 µs`
+ * @returns such as `157 µs`, `1.24 ms` or `12.5 s`
  */
 export function writeDuration(duration: number): string {
-  const { unit } = formatQuantity(duration, 'shortTime', 'si')
-  const value = duration * 1e6
+  const [size, unit] = duration < 1e-3 ? [1e-6, 'µs'] : duration < 1 ? [1e-3, 'ms'] : [1, 's']
+  const value = duration / size
   return `${value < 9.95 ? value.toFixed(1) : value.toFixed(0)} ${unit}`
 }

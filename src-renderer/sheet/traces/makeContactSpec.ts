@@ -46,7 +46,7 @@ export function makeContactSpec(
     low < 0 || high === 0 ? low - room || -limit : -0.08 * limit,
     high > 0 ? high + room : 0.08 * limit,
   ]
-  const spec = makeTraceSpec(frame, width, ends, 'force', 2)
+  const spec = makeTraceSpec(frame, width, ends, 'force', 3)
   const points = thinPoints(trace.t, trace.force, frame)
   spec.curves.push({ points, colour: inks.ink, width: 1.5 })
   if (frozen) {

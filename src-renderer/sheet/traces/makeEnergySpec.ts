@@ -16,7 +16,7 @@ const HATCHES = {
 } as const
 
 /** The stack's edge stands at 1; a little room beyond it shows on which side it strays [1]. */
-const END = 1.04
+const END = 1.08
 
 /**
  * Describes the chart of the energy: its shares stacked across, so that their edge is straight where energy
@@ -34,7 +34,7 @@ export function makeEnergySpec(
   frozen: EnergyShares | null,
 ): FrameSpec {
   const { inks } = frame
-  const spec = makeTraceSpec(frame, width, [0, END], 'share', 2)
+  const spec = makeTraceSpec(frame, width, [0, END], 'ratio', 2)
   spec.x.grid = []
   const bands = shares.bands.map(({ name, edge }) => ({ name, points: thinPoints(shares.t, edge, frame) }))
   bands.forEach(({ points }, i) => {

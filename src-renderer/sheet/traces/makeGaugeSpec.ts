@@ -37,7 +37,7 @@ export function makeGaugeSpec(
   frozen: PageGauge | null,
 ): FrameSpec {
   const { fromT, toT, height, inks, units } = frame
-  const spec = makeTraceSpec(frame, width, [-limit, limit], quantity, 3)
+  const spec = makeTraceSpec(frame, width, [-limit, limit], quantity, 4)
   const points = thinPoints(gauge.t, gauge[quantity], frame)
   const pixels = height / (toT - fromT)
 
@@ -102,7 +102,7 @@ function drawPassing(
   direction: 'right' | 'left',
   inks: Inks,
 ): void {
-  context.fillStyle = inks.ink
+  context.fillStyle = inks.unit
   for (const { from, to } of passing) {
     const top = Math.max(area.top, y.at(to))
     const bottom = Math.min(area.bottom, y.at(from))

@@ -82,8 +82,9 @@ export function makeLine(
   return { type: 'line', ...ends, borderColor: inks.ink, borderWidth: width, borderDash: dash }
 }
 
-/** Length of a dimension line from which its words stand on it [px]. */
-const ROOM_FOR_WORDS = 46
+/** Room that words take along a dimension line: of each letter as a share of the type's size, and around them [px]. */
+const LETTER = 0.47
+const AROUND = 8
 
 /**
  * A dimension line in time, with arrows at both ends and its words along it.
@@ -121,7 +122,7 @@ export function makeDimension(
     borderWidth: 1,
     arrowHeads: pixels < 18 ? {} : { start: arrow, end: arrow },
     label: {
-      display: pixels >= ROOM_FOR_WORDS,
+      display: words !== '' && pixels >= words.length * LETTER * inks.size + AROUND,
       content: words,
       rotation: -90,
       padding: 2,
