@@ -5,6 +5,9 @@ import type { PlaceTrace, RunRecord } from '../records/record'
 /** Difference of the envelopes up to which the methods count as one. */
 const AGREE = 0.01
 
+/** Difference under which the methods are equal but for rounding. */
+const ROUNDING = 1e-12
+
 /** What one method made of a rig. */
 export interface MethodRecord {
   line: Line
@@ -82,7 +85,7 @@ function compareTraces(
 }
 
 function judge(line: Line, envelope: number): string {
-  const share = `${(100 * envelope).toPrecision(2)} %`
+  const share = `${envelope < ROUNDING ? 0 : Number((100 * envelope).toPrecision(2))} %`
   const { run, bars } = line.rig
   const materials = bars.flatMap((bar) => bar.sections.map((section) => section.material))
   const plastic = materials.some((one) => one.yield !== null && one.hardening !== null)

@@ -58,7 +58,7 @@ function listOverYield(rows: Row[], byElements: boolean): Caution[] {
       const nominal = Math.max(tension.peak, -compression.peak)
       const local = Math.max(tension.local, -compression.local)
       const { yield: limit, hardening } = source.material
-      return { place, nominal, local, limit: limit ?? Infinity, yields: byElements && hardening !== null }
+      return { place, nominal, local, limit: limit ?? Infinity, hardens: hardening !== null }
     })
     .filter(({ local, limit }) => local > limit)
   if (over.length === 0) return []
@@ -70,30 +70,26 @@ function listOverYield(rows: Row[], byElements: boolean): Caution[] {
       message:
         `${only ? 'Local stress at a fillet' : 'Stress'} over yield: up to ${describeQuantity(worst.local, 'stress')} in ` +
         `${worst.place}, yield ${describeQuantity(worst.limit, 'stress')}. ` +
-        describeYielding(
-          only,
-          over.every(({ yields }) => yields),
-          byElements,
-        ),
+        describeYielding(only, over, byElements),
       where: joinPlaces(over.map(({ place }) => place)),
     },
   ]
 }
 
 /** What stress over yield means for the numbers: only in corners, followed by the run, or left out by it. */
-function describeYielding(only: boolean, followed: boolean, byElements: boolean): string {
+function describeYielding(only: boolean, over: { hardens: boolean }[], byElements: boolean): string {
   if (only) return 'The corner yields, which the run does not follow; the waves hardly change.'
-  if (followed) {
+  const hardens = over.every((each) => each.hardens)
+  if (byElements && hardens) {
     return (
-      'The run follows yielding and hardening, and the part stays deformed. Fillet factors and the strains of gauges ' +
-      'are still those of an elastic bar.'
+      'The run follows yielding and hardening, and the part stays deformed. Fillet factors are still those of an ' +
+      'elastic bar.'
     )
   }
   const linear =
     'The run is linear: real stresses are lower there, the part stays deformed, and what comes after is not as computed.'
-  return byElements
-    ? `${linear} Give the material its hardening, "0 Pa" for none, and the elements let it yield.`
-    : `${linear} With the hardening of the material given, a run by elements follows it.`
+  const give = hardens ? '' : ' Give the material its hardening, "0 Pa" for none.'
+  return `${linear}${give}${byElements ? '' : ' A run by elements follows it.'}`
 }
 
 function listLargeStrain(rows: Row[], byElements: boolean): Caution[] {
