@@ -1,6 +1,7 @@
-import { chooseLooks, lookAtDiamondSquares, lookAtDiamondSums } from './lookAtDiamonds'
+import { lookAtDiamondSquares, lookAtDiamondSums } from './lookAtDiamonds'
 import { lookAtNodeSquares, lookAtNodeSums } from './lookAtNodes'
-import { reachNodes, type Strip, type Tile, widenPixel } from './pixels'
+import { makeLooks } from './looks'
+import { type Strip, type Tile, widenPixel } from './pixels'
 import { seen } from './seen'
 import type { SpanPlace } from './spanPlace'
 import type { WaveSpan } from './waveSpan'
@@ -29,25 +30,29 @@ export function drawWaves(
 ): void {
   const { quantity } = window
   const level = chooseLevel(columns, rows)
-  const xs = columns.map((strip) => cutStrip(strip, span.cells, level))
-  const ts = rows.map((strip) => cutStrip(strip, span.steps, level))
+  const x = makeLooks(columns, span.cells, level)
+  const t = makeLooks(rows, span.steps, level)
   const { area, impedance: Z, modulus } = place
   const share = { stress: 1 / area, force: 1, velocity: 1 / Z, energy: 1 / (modulus * area * area) }[quantity]
   const sign = quantity === 'velocity' ? -1 : 1
 
-  for (const t of ts) {
-    const G = (fall * (t.from + t.to)) / 2
+  for (let j = 0; j < rows.length; j++) {
+    const G = fall * t.middle[j]
     const shift = quantity === 'velocity' ? G : 0
     const h = (Z * G) / 2
-    for (const x of xs) {
-      const rough = x.inside && t.inside
+    for (let i = 0; i < columns.length; i++) {
+      const rough = x.rough[i] === 1 && t.rough[j] === 1
       if (quantity === 'energy') {
-        if (rough) lookAtDiamondSquares(span, x.looks, t.looks, level, h)
-        else lookAtNodeSquares(span, x.first, x.last, t.first, t.last, h)
-      } else if (rough) lookAtDiamondSums(span, x.looks, t.looks, level, sign)
-      else lookAtNodeSums(span, x.first, x.last, t.first, t.last, sign)
-      const at = t.index * window.columns + x.index
-      widenPixel(values, at, share * seen[0] + shift, share * seen[1] + shift)
+        if (rough) lookAtDiamondSquares(span, x, i, t, j, level, h)
+        else lookAtNodeSquares(span, x.first[i], x.last[i], t.first[j], t.last[j], h)
+      } else if (rough) lookAtDiamondSums(span, x, i, t, j, level, sign)
+      else lookAtNodeSums(span, x.first[i], x.last[i], t.first[j], t.last[j], sign)
+      widenPixel(
+        values,
+        t.index[j] * window.columns + x.index[i],
+        share * seen[0] + shift,
+        share * seen[1] + shift,
+      )
     }
   }
 }
@@ -57,18 +62,4 @@ function chooseLevel(columns: readonly Strip[], rows: readonly Strip[]): number 
   const widest = (strips: readonly Strip[]) => Math.max(...strips.map(({ from, to }) => to - from))
   const level = Math.floor(Math.log2(Math.min(widest(columns), widest(rows)) / 2))
   return level < LEAST_LEVEL ? 0 : Math.min(level, MOST_LEVEL)
-}
-
-/** A strip with its nodes and its looks; the nodes those of the diamonds too whose middles lie in it. */
-function cutStrip(strip: Strip, end: number, level: number) {
-  const size = level > 0 ? 2 ** level : 0
-  const wide = { from: strip.from - size / 2, to: strip.to + size / 2 }
-  const nodes = reachNodes(wide, (at) => at, end + 1)
-  return {
-    ...strip,
-    first: nodes.from,
-    last: nodes.to,
-    inside: level > 0 && strip.from >= size && strip.to <= end - size,
-    looks: chooseLooks(strip.from, strip.to, level),
-  }
 }

@@ -1,39 +1,33 @@
 import { evaluateLeastSquare } from './evaluateLeastSquare'
+import type { Looks } from './looks'
 import { seen } from './seen'
 import type { WaveSpan } from './waveSpan'
-
-/** Places at which a stretch of positions or steps is looked at. */
-export interface Looks {
-  from: number
-  step: number
-  count: number
-}
-
-/**
- * Looks a little closer than every half of 2^level, which meets every diamond of that size whose middle
- * lies in the stretch.
- */
-export function chooseLooks(from: number, to: number, level: number): Looks {
-  const count = Math.max(1, Math.ceil((to - from) / (0.45 * 2 ** level)))
-  const step = (to - from) / count
-  return { from: from + step / 2, step, count }
-}
 
 /**
  * Finds the extremes of `sign f + g` over the diamonds that a window meets. Runs of f and of g of one
  * parity cross in a diamond of (position, step), 2^level across, at whose nodes each value of the one
  * meets each of the other; so its extremes are those of their extremes.
  *
+ * @param p looks of the columns of pixels, of which column i counts
+ * @param k looks of the rows of pixels, of which row j counts
  * @param level 1 or more; the window lies 2^level inside the span and the run
  * @param sign +1 for the force [N], -1 for Z times the velocity [N]
  */
 export function lookAtDiamondSums(
   { cells, right, left }: WaveSpan,
   p: Looks,
+  i: number,
   k: Looks,
+  j: number,
   level: number,
   sign: number,
 ): void {
+  const pFrom = p.from[i]
+  const pStep = p.step[i]
+  const pCount = p.count[i]
+  const kFrom = k.from[j]
+  const kStep = k.step[j]
+  const kCount = k.count[j]
   let high = -Infinity
   let low = Infinity
   for (let parity = 0; parity <= 1; parity++) {
@@ -44,10 +38,10 @@ export function lookAtDiamondSums(
     const fBottom = sign > 0 ? f.low : f.high
     const gTop = g.high
     const gBottom = g.low
-    for (let i = 0; i < k.count; i++) {
-      const step = k.from + i * k.step
-      for (let j = 0; j < p.count; j++) {
-        const position = p.from + j * p.step
+    for (let m = 0; m < kCount; m++) {
+      const step = kFrom + m * kStep
+      for (let n = 0; n < pCount; n++) {
+        const position = pFrom + n * pStep
         const a = (step - position + cells - parity) >> level
         const b = (step + position - other) >> level
         const top = sign * fTop[a] + gTop[b]
@@ -65,20 +59,28 @@ export function lookAtDiamondSums(
 export function lookAtDiamondSquares(
   { cells, right, left }: WaveSpan,
   p: Looks,
+  i: number,
   k: Looks,
+  j: number,
   level: number,
   h: number,
 ): void {
+  const pFrom = p.from[i]
+  const pStep = p.step[i]
+  const pCount = p.count[i]
+  const kFrom = k.from[j]
+  const kStep = k.step[j]
+  const kCount = k.count[j]
   let high = -Infinity
   let low = Infinity
   for (let parity = 0; parity <= 1; parity++) {
     const other = (parity + cells) & 1
     const f = right.readLevel(level, parity)
     const g = left.readLevel(level, other)
-    for (let i = 0; i < k.count; i++) {
-      const step = k.from + i * k.step
-      for (let j = 0; j < p.count; j++) {
-        const position = p.from + j * p.step
+    for (let m = 0; m < kCount; m++) {
+      const step = kFrom + m * kStep
+      for (let n = 0; n < pCount; n++) {
+        const position = pFrom + n * pStep
         const a = (step - position + cells - parity) >> level
         const b = (step + position - other) >> level
         const f0 = f.low[a] - h

@@ -68,7 +68,8 @@ export function reachNodes(
   find: (at: number) => number,
   count: number,
 ): Reach {
-  const hold = (i: number) => Math.min(count - 1, Math.max(0, i))
+  // As small integers: a zero with a sign would make every look at an array slow.
+  const hold = (i: number) => Math.min(count - 1, Math.max(0, i)) | 0
   const reach = { from: Math.ceil(find(from)), to: Math.floor(find(to)) }
   if (reach.to >= reach.from) return { from: hold(reach.from), to: hold(reach.to) }
   const nearest = hold(Math.round(find((from + to) / 2)))
