@@ -44,6 +44,19 @@ export const UNITS = {
   voltage: both('V', 1),
   share: both('%', 1e-2),
   ratio: both('', 1),
+  number: both('', 1),
 } satisfies Record<string, Record<UnitSystem, Unit>>
 
 export type UnitDimension = keyof typeof UNITS
+
+/** True where the window has units for what the rig's reader calls a dimension. */
+export function isUnitDimension(name: string): name is UnitDimension {
+  return Object.hasOwn(UNITS, name)
+}
+
+/** True where a unit as typed is of the US customary system; a second is of both and counts as SI. */
+export function isUsUnit(typed: string): boolean {
+  return /(^|[^A-Za-z])(in|inch|inches|ft|foot|feet|mil|lb|lbs|lbm|lbf|kip|kips|psi|ksi|Msi|slug|oz|ozf)(?![A-Za-z])/.test(
+    typed,
+  )
+}

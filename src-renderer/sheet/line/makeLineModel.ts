@@ -1,5 +1,4 @@
 import type { DrawnEnd, DrawnSection, LineDrawing } from '../../../src-main/contract/lineDrawing'
-import type { Caution } from '../../../src-main/contract/result'
 import { formatQuantity } from '../../format/formatQuantity'
 import type { UnitSystem } from '../../format/units'
 import type { RigDocument } from '../../stores/document/rigDocument'
@@ -73,30 +72,6 @@ export function listSectionModels(
       next,
     }
   })
-}
-
-/**
- * The number of each caution, where it has a place on the line: above its section or its bar.
- *
- * @param cautions - of the result, numbered from 1 in their order
- * @param models - sections of the line
- * @returns numbers by the path of the section they stand over
- */
-export function placeCautions(
-  cautions: readonly Caution[],
-  models: readonly SectionModel[],
-): Map<string, number[]> {
-  const places = new Map<string, number[]>()
-  for (const [index, { where }] of cautions.entries()) {
-    const named = where.split('; ')
-    for (const { path, barName, section } of models) {
-      const whole = section.index === 0 && named.includes(barName)
-      const name = `${barName}, section ${section.index + 1}`
-      if (!whole && !named.some((one) => one === name || one.startsWith(`${name} (`))) continue
-      places.set(path, [...(places.get(path) ?? []), index + 1])
-    }
-  }
-  return places
 }
 
 /** Half the height of the bar at an end of the line or at a joint [px], the larger of both sides. */

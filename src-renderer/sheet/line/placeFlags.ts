@@ -13,8 +13,9 @@ export interface Flag {
   /** Top of the bar there [px]. */
   edge: number
   lean: -1 | 1
-  /** Width that it may take [px]. */
+  /** Width that it may take, and that it takes [px]. */
   room: number
+  width: number
 }
 
 /**
@@ -37,8 +38,9 @@ export function placeFlags(line: LineDrawing, scale: LineScale, size: number): F
     const leftRoom = gauge.x - taken - 4
     const lean = rightRoom >= wanted || rightRoom >= leftRoom ? 1 : -1
     const room = lean === 1 ? rightRoom : leftRoom
-    taken = lean === 1 ? gauge.x + Math.min(wanted, room) : gauge.x
-    return { ...gauge, edge: scale.centre - scale.half(findDiameterAt(line, gauge.place)), lean, room }
+    const width = Math.min(wanted, Math.max(room, 24))
+    taken = lean === 1 ? gauge.x + width : gauge.x
+    return { ...gauge, edge: scale.centre - scale.half(findDiameterAt(line, gauge.place)), lean, room, width }
   })
 }
 

@@ -24,11 +24,17 @@ export interface LineDrag {
   begin(event: PointerEvent, label: string, axis: 'x' | 'y', values: DragValue[]): void
 }
 
+/** Sizes of units in which a length of zero may be typed [m]; of other lengths the run tells what they are. */
+const LENGTHS: Record<string, number> = { mm: 1e-3, cm: 1e-2, m: 1, um: 1e-6, inch: 0.0254, ft: 0.3048 }
+
 /** Makes the ways to drag values in the drawing; runs are coarse until the hand lets go. */
 export function useLineDrag(): LineDrag {
   const rig = useRig()
   const canDrag = (...paths: string[]): boolean =>
-    paths.every((path) => readPlainValue(readAt(rig.document.value, path)) !== null)
+    paths.every((path) => {
+      const plain = readPlainValue(readAt(rig.document.value, path))
+      return plain !== null && (plain.number !== 0 || Object.hasOwn(LENGTHS, plain.unit))
+    })
 
   function begin(event: PointerEvent, label: string, axis: 'x' | 'y', values: DragValue[]): void {
     if (event.button !== 0 || !canDrag(...values.map(({ path }) => path))) return
@@ -78,7 +84,7 @@ function follow(
   pixels: number,
   fine: boolean,
 ): string {
-  const size = value / plain.number
+  const size = plain.number === 0 ? LENGTHS[plain.unit] : value / plain.number
   const step = chooseStep(Math.abs(perPixel / size) * (fine ? 0.1 : 1))
   const wanted = (value + pixels * perPixel * (fine ? 0.1 : 1)) / size
   const onGrid = Math.round(wanted / step) * step

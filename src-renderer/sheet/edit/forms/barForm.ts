@@ -39,7 +39,7 @@ export function makeBarForm(document: RigDocument, path: string): PartForm {
         value(`${path}.preload`, 'Preload, tension +', 'none'),
         value(`${path}.displacement`, 'Displacement in x, s', 'none', 120),
         value(`${path}.allowable.tension`, 'Tension allowable', 'as material'),
-        value(`${path}.allowable.compression`, 'Compression allowable', 'as material', 112),
+        value(`${path}.allowable.compression`, 'Compression allowable', 'as material', 116),
       ],
     ],
     actions: [

@@ -31,7 +31,7 @@ export function makeMaterialForm(document: RigDocument, path: string): PartForm 
         value(`${path}.modulus`, 'Modulus', undefined, 76),
         { path: `${path}.poisson`, label: 'Poisson ν', kind: 'number', empty: 'unknown', width: 64 },
         value(`${path}.allowable.tension`, 'Tension allowable', 'none'),
-        value(`${path}.allowable.compression`, 'Compression allowable', 'none', 112),
+        value(`${path}.allowable.compression`, 'Compression allowable', 'none', 116),
         value(`${path}.yield`, 'Yield', 'elastic', 76),
       ],
       [
@@ -48,14 +48,16 @@ export function makeMaterialForm(document: RigDocument, path: string): PartForm 
         value(`${path}.spall`, 'Spall stress', 'none', 76),
         value(`${path}.fatigue.strength`, 'Fatigue strength', 'none'),
         { path: `${path}.fatigue.exponent`, label: 'Exponent', kind: 'number', empty: 'none', width: 60 },
-        {
-          path: `${path}.source`,
-          label: 'Where the numbers come from',
-          kind: 'words',
-          empty: 'not said',
-          width: 190,
-        },
       ],
+    ],
+    beside: [
+      {
+        path: `${path}.source`,
+        label: 'Source',
+        kind: 'words',
+        empty: 'not said',
+        width: 190,
+      },
     ],
     actions: [
       {

@@ -40,10 +40,10 @@ export function makeSectionForm(document: RigDocument, path: string): PartForm {
           kind: 'choice',
           choices: listMaterialChoices(document, `as the bar (${document.bars?.[bar]?.material ?? 'none'})`),
           empty: 'as the bar',
-          width: 92,
+          width: 84,
         },
-        value(`${path}.allowable.tension`, 'Tension allowable', 'as the bar', 92),
-        value(`${path}.allowable.compression`, 'Compression allowable', 'as the bar', 112),
+        value(`${path}.allowable.tension`, 'Tension allowable', 'as the bar', 90),
+        value(`${path}.allowable.compression`, 'Compression allowable', 'as the bar', 116),
       ],
     ],
     beside: [
@@ -124,7 +124,7 @@ function listOutlineFields(
   label: string,
   empty?: string,
 ): FieldSpec[] {
-  if (typeof outline !== 'object') return [value(path, label, empty, empty === undefined ? 128 : 76)]
+  if (typeof outline !== 'object') return [value(path, label, empty, empty === undefined ? 116 : 74)]
   return [
     value(`${path}.from`, `${label} left`, undefined, 80),
     value(`${path}.to`, `${label} right`, undefined, 80),
