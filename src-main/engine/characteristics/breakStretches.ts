@@ -45,7 +45,15 @@ function split(run: WaveRun, index: number, at: number, force: number, k: number
     right: opened.right,
   })
   run.stretches.splice(index, 1, near, far)
-  const law = makeContact(makeBarSide(near.right, 1), makeBarSide(far.left, -1), 0, run.beat)
+  const { f, g } = gradedKernel
+  const slot = near.slot + at
+  const velocity = (2 * (g[slot] - f[slot - 1])) / (near.right.impedance + far.left.impedance)
+  const law = makeContact(
+    makeBarSide(near.right, 1, velocity),
+    makeBarSide(far.left, -1, velocity),
+    0,
+    run.beat,
+  )
   const node = -1 - run.breaks.length
   run.nodes.push({ index: node, law, leftBlock: -1, rightBlock: -1 })
   run.laws.set(node, law)

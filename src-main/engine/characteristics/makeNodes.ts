@@ -26,7 +26,7 @@ export function makeNodes(line: Line, blocks: readonly LiveBlock[]): Nodes {
     const port = hand === 1 ? blocks[lastBlock].right : blocks[0].left
     const span = hand === 1 ? line.spans.length - 1 : 0
     const start = evaluateInitial(line, span, hand === 1 ? line.spans[span].cells : 0)
-    const face = { side: makeBarSide(port, hand), hand, impedance: port.impedance, ...start }
+    const face = { side: makeBarSide(port, hand, start.velocity), hand, impedance: port.impedance, ...start }
     return makeEnd(end, face, beat, hand === 1 ? outside.right : outside.left, bodies)
   }
 
@@ -34,7 +34,11 @@ export function makeNodes(line: Line, blocks: readonly LiveBlock[]): Nodes {
     const node = line.nodes[left.rightNode]
     const joint = node.kind === 'joint' ? line.rig.joints[node.joint] : null
     if (joint !== null && joint.kind !== 'bonded') {
-      return makeJoint(joint, makeBarSide(left.right, 1), makeBarSide(right.left, -1), beat, bodies)
+      const span = left.rightNode
+      const before = evaluateInitial(line, span - 1, line.spans[span - 1].cells).velocity
+      const after = evaluateInitial(line, span, 0).velocity
+      const faces = [makeBarSide(left.right, 1, before), makeBarSide(right.left, -1, after)] as const
+      return makeJoint(joint, ...faces, beat, bodies)
     }
     if (node.loads.length === 0) return makeBonded(left.right, right.left, null)
     const books = new Outside(beat)

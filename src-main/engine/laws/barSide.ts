@@ -19,18 +19,19 @@ export interface Port {
  *
  * @param port the face
  * @param hand +1 where the bar stands left of the node
+ * @param velocity of the face at the start [m/s]
  */
-export function makeBarSide(port: Port, hand: Hand): Side {
+export function makeBarSide(port: Port, hand: Hand, velocity: number): Side {
   const { arriving, leaving, leavingOffset } = port
   const Y = 1 / port.impedance
-  let last = 0
+  let last = velocity
   return {
     admittance: () => Y,
     freeVelocity: (k) => -hand * 2 * arriving[k] * Y,
     lastVelocity: () => last,
-    take(k, force, velocity) {
+    take(k, force, now) {
       leaving[k + leavingOffset] = force - arriving[k]
-      last = velocity
+      last = now
     },
   }
 }
