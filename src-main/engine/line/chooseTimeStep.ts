@@ -23,16 +23,16 @@ export function chooseTimeStep(travelTimes: readonly number[], wanted: number): 
   }
   const taus = [...counts.keys()]
   const weights = [...counts.values()]
-  const total = travelTimes.reduce((sum, tau) => sum + tau, 0)
+  const noise = 1e-12 * travelTimes.reduce((sum, tau) => sum + tau, 0)
 
   let best = wanted
   let bestError = Infinity
   for (const dt of listCandidates(taus, wanted)) {
     let error = 0
-    for (let i = 0; i < taus.length && error <= bestError; i++) {
+    for (let i = 0; i < taus.length && error <= Math.max(bestError, noise); i++) {
       error += weights[i] * Math.abs(countCells(taus[i], dt) * dt - taus[i])
     }
-    error = error < 1e-12 * total ? 0 : error
+    error = error < noise ? 0 : error
     if (error < bestError || (error === bestError && dt > best)) {
       best = dt
       bestError = error

@@ -31,9 +31,11 @@ describe('the ledgers of energy and momentum', () => {
     const rig = (steps: number) =>
       makeRig([makeBar('bar', [makeSection(12 * CELL, 1e-3)])], { duration: steps * DT, timeStep: DT })
     expect([...marchRig(rig(5)).record.energy.step]).toEqual([0, 1, 2, 3, 4, 5])
-    const { step } = marchRig(rig(5000)).record.energy
-    expect(step).toHaveLength(129)
-    expect([step[0], step[128]]).toEqual([0, 5000])
+    const step = [...marchRig(rig(5000)).record.energy.step]
+    expect(step.length).toBeGreaterThan(100)
+    expect([step[0], step[step.length - 1]]).toEqual([0, 5000])
+    const strides = step.slice(1).map((k, i) => k - step[i])
+    expect(Math.max(...strides) - Math.min(...strides)).toBeLessThanOrEqual(1)
     expect(marchRig(rig(1000), true).record.energy.step).toHaveLength(1001)
   })
 
