@@ -1,4 +1,4 @@
-import { onScopeDispose, shallowRef, watch, type ShallowRef } from 'vue'
+import { shallowRef, watch, type ShallowRef } from 'vue'
 import type { PageResult } from '../../../src-main/contract/bridge'
 import { useBridge } from '../../stores/useBridge'
 import { useLayout } from '../../stores/useLayout'
@@ -7,6 +7,7 @@ import { useView } from '../../stores/useView'
 import type { ContactSpell } from './draw/fieldModel'
 import { listSpells } from './listSpells'
 import { makeLatest } from './makeLatest'
+import { shareByRun } from './shareByRun'
 
 /**
  * Keeps the spells in which the joints that can open carry force, within the time that is looked at: read
@@ -14,7 +15,7 @@ import { makeLatest } from './makeLatest'
  *
  * @returns spells of all joints but bonded ones
  */
-export function useContacts(): ShallowRef<ContactSpell[]> {
+export const useContacts: () => ShallowRef<ContactSpell[]> = shareByRun(() => {
   const [bridge, run, view, layout] = [useBridge(), useRun(), useView(), useLayout()]
   const contacts = shallowRef<ContactSpell[]>([])
 
@@ -61,9 +62,8 @@ export function useContacts(): ShallowRef<ContactSpell[]> {
     },
     { immediate: true },
   )
-  onScopeDispose(() => latest.drop())
   return contacts
-}
+})
 
 interface Wanted {
   result: PageResult

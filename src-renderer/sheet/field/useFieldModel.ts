@@ -12,8 +12,8 @@ import { useContacts } from './useContacts'
 import { useFieldPicture } from './useFieldPicture'
 import { useRulers } from './useRulers'
 
-/** Distance of the signs of tension and compression in the field [px]. */
-const SIGN_DISTANCE = 28
+/** Distance of the signs of tension and compression in the field, in sizes of type. */
+const SIGN_DISTANCE = 2.5
 
 /**
  * Gathers all that the field shows over its picture.
@@ -40,8 +40,8 @@ export function useFieldModel(palette: Ref<Palette>): ComputedRef<FieldModel> {
     return listSignMarks(
       shown,
       limit.value,
-      Math.round(layout.fieldWidth / SIGN_DISTANCE),
-      Math.round(layout.field.height / SIGN_DISTANCE),
+      Math.round(layout.fieldWidth / (SIGN_DISTANCE * layout.type.axis)),
+      Math.round(layout.field.height / (SIGN_DISTANCE * layout.type.axis)),
     )
   })
 

@@ -51,8 +51,7 @@ const ANCHOR: Record<string, string> = { center: 'middle', right: 'end', end: 'e
 
 /**
  * Takes the calls that draw on a canvas and writes them down as SVG, so that a picture is saved exactly as
- * it is shown, with its text as text. It knows what this program's drawings use; pictures and patterns are
- * no part of that.
+ * it is shown, with its text as text. It knows what this program's drawings use; patterns are no part of that.
  */
 export class SvgContext extends Settings {
   /** What a chart takes for its canvas; set by who draws one. */
@@ -174,6 +173,15 @@ export class SvgContext extends Settings {
   measureText(text: string | null): { width: number } {
     return { width: text === null ? 0 : this.measure(text, this.font) }
   }
+  /** A picture goes in whole, as PNG. */
+  drawImage(image: { toDataURL(): string }, x: number, y: number, width: number, height: number): void {
+    const matrix = this.transform.map(writeNumber).join(' ')
+    this.parts.push(
+      `<g${this.common()}><image transform="matrix(${matrix})" x="${writeNumber(x)}" y="${writeNumber(y)}"` +
+        ` width="${writeNumber(width)}" height="${writeNumber(height)}" preserveAspectRatio="none"` +
+        ` image-rendering="pixelated" href="${escapeMarkup(image.toDataURL())}"/></g>`,
+    )
+  }
   createLinearGradient(x0: number, y0: number, x1: number, y1: number): SvgGradient {
     return new SvgGradient(this.transform, [x0, y0, x1, y1])
   }
@@ -205,10 +213,16 @@ export class SvgContext extends Settings {
     // The clip stands on a group of its own: on the text it would be moved along with it.
     this.parts.push(
       `<g${this.common()}><text transform="matrix(${transform.map(writeNumber).join(' ')})" x="${writeNumber(x)}" y="${writeNumber(y + drop)}"` +
-        ` font-family="${escapeMarkup(family.replaceAll('"', "'"))}" font-size="${size}"` +
+        `${this.stretch(text)} font-family="${escapeMarkup(family.replaceAll('"', "'"))}" font-size="${size}"` +
         `${weight === '' ? '' : ` font-weight="${weight}"`}${anchor === 'start' ? '' : ` text-anchor="${anchor}"`}` +
         `${paint}>${escapeMarkup(text)}</text></g>`,
     )
+  }
+
+  /** Holds a text to its width as it was drawn, where the reader of the file has not its type. */
+  private stretch(text: string): string {
+    const { width } = this.measureText(text)
+    return width > 0 ? ` textLength="${writeNumber(width)}" lengthAdjust="spacingAndGlyphs"` : ''
   }
 
   private pen(): string {

@@ -2,14 +2,19 @@ import { drawHaloText } from '../../../plot/haloText'
 import { placeLabels, type Box } from '../../../plot/placeLabels'
 import { drawFronts } from './drawFronts'
 import { drawKey } from './drawKey'
-import { FONT } from './font'
+import { writeFont } from '../../charts/inks'
 import { CHAIN, DOTS, drawLevels, drawUprights } from './drawLines'
 import type { FieldModel } from './fieldModel'
 import type { FieldScales } from './fieldScales'
 import { listFrontLabels, listFrontLines } from './listFrontLabels'
 
-/** Half the width of the bar that stands for a contact that carries force [px]. */
+/** Size of type that the measures of marks below are for [px]; they grow with it. */
+const TYPE = 11
+
+/** Half the length of a sign, half the width of the bar of a contact that carries force, radius of the ring [px]. */
+const SIGN = 2.5
 const CONTACT = 2.5
+const RING = 8
 
 /**
  * Draws what stands over the field's picture: grid, sections, signs, fronts with their numbers, contacts,
@@ -64,12 +69,12 @@ export function drawField(context: CanvasRenderingContext2D, model: FieldModel, 
 
   const taken = [...drawGoverning(context, model, scales, ink), ...drawGauges(context, model, scales, ink)]
   const keyBox = drawKey(context, model, scales, taken)
-  context.font = `400 ${model.axisSize}px ${FONT}`
+  context.font = writeFont(model.axisSize)
   const labels = listFrontLabels(fronts, (text) => context.measureText(text).width, model.axisSize, height)
   const room = { left: 2, top: 2, right: width - 2, bottom: height - 2 }
   for (const label of placeLabels(labels, room, [...taken, keyBox])) {
     drawHaloText(context, label.text, label.x, label.y, {
-      font: `400 ${model.axisSize}px ${FONT}`,
+      font: writeFont(model.axisSize),
       ink,
       halo: palette.paper,
     })
@@ -89,11 +94,11 @@ function drawSigns(
   for (const { across, up, positive } of signs) {
     const x = Math.round(across * scales.width) + 0.5
     const y = Math.round((1 - up) * scales.height) + 0.5
-    context.moveTo(x - 2.5, y)
-    context.lineTo(x + 2.5, y)
+    context.moveTo(x - half, y)
+    context.lineTo(x + half, y)
     if (!positive) continue
-    context.moveTo(x, y - 2.5)
-    context.lineTo(x, y + 2.5)
+    context.moveTo(x, y - half)
+    context.lineTo(x, y + half)
   }
   context.stroke()
   context.restore()
@@ -101,57 +106,60 @@ function drawSigns(
 
 function drawContacts(
   context: CanvasRenderingContext2D,
-  { contacts }: FieldModel,
+  { contacts, axisSize }: FieldModel,
   { x, t }: FieldScales,
   ink: string,
 ): void {
+  const half = (CONTACT * axisSize) / TYPE
   context.fillStyle = ink
   for (const spell of contacts) {
-    context.fillRect(x.at(spell.x) - CONTACT, t.at(spell.to), 2 * CONTACT, t.at(spell.from) - t.at(spell.to))
+    context.fillRect(x.at(spell.x) - half, t.at(spell.to), 2 * half, t.at(spell.from) - t.at(spell.to))
   }
 }
 
 /** The ring and its chain lines; returns the areas that its words take. */
 function drawGoverning(
   context: CanvasRenderingContext2D,
-  { governing, palette, bodySize }: FieldModel,
+  { governing, palette, axisSize, bodySize }: FieldModel,
   { x, t, width, height }: FieldScales,
   ink: string,
 ): Box[] {
   if (!governing) return []
+  const ring = (RING * axisSize) / TYPE
   const atX = x.at(governing.x)
   const atT = t.at(governing.t)
   const style = { colour: ink, width: governing.over ? 2 : 1, dash: CHAIN }
   if (atX > -1 && atX < width + 1) drawUprights(context, [atX], 0, height, style)
   if (atT < -1 || atT > height + 1) return []
-  drawLevels(context, [atT], Math.max(0, atX + 9), width, style)
+  drawLevels(context, [atT], Math.max(0, atX + ring + 1), width, style)
   if (atX < -1 || atX > width + 1) return []
 
   context.save()
-  for (const [radius, lineWidth, colour] of [
-    [8, 5, palette.paper],
-    [8, 2, ink],
+  for (const [lineWidth, colour] of [
+    [5, palette.paper],
+    [2, ink],
   ] as const) {
     context.strokeStyle = colour
     context.lineWidth = lineWidth
     context.beginPath()
-    context.arc(atX, atT, radius, 0, 2 * Math.PI)
+    context.arc(atX, atT, ring, 0, 2 * Math.PI)
     context.stroke()
   }
   context.fillStyle = ink
   context.beginPath()
   context.arc(atX, atT, 1.5, 0, 2 * Math.PI)
   context.fill()
-  const font = `600 ${bodySize}px ${FONT}`
+  const font = writeFont(bodySize, 600)
   context.font = font
   const wide = context.measureText(governing.text).width
   context.restore()
-  const right = atX + 14 + wide < width - 4
-  const left = right ? atX + 14 : atX - 14 - wide
-  const y = atT - 12 < bodySize ? atT + 14 : atT - 12
+  const aside = ring + 6
+  const right = atX + aside + wide < width - 4
+  const left = right ? atX + aside : atX - aside - wide
+  const y = atT - ring - 4 < bodySize ? atT + ring + 6 : atT - ring - 4
   drawHaloText(context, governing.text, left, y, { font, ink, halo: palette.paper, align: 'left' })
   return [
-    { left: atX - 12, top: atT - 12, right: atX + 12, bottom: atT + 12 },
+    { left: atX - ring - 4, top: atT - ring - 4, right: atX + ring + 4, bottom: atT + ring + 4 },
     { left: left - 4, top: y - bodySize / 2 - 2, right: left + wide + 4, bottom: y + bodySize / 2 + 2 },
   ]
 }
@@ -162,7 +170,7 @@ function drawGauges(
   { x, width, height }: FieldScales,
   ink: string,
 ): Box[] {
-  const font = `600 ${axisSize}px ${FONT}`
+  const font = writeFont(axisSize, 600)
   const y = height - axisSize / 2 - 4
   return (line?.gauges ?? []).flatMap((gauge) => {
     const at = x.at(gauge.x)

@@ -1,7 +1,7 @@
 import { isOver, type Box } from '../../../plot/placeLabels'
 import type { FieldModel } from './fieldModel'
 import type { FieldScales } from './fieldScales'
-import { FONT } from './font'
+import { writeFont } from '../../charts/inks'
 
 /** Space about the key's words and below it, where the names of gauges stand [px]. */
 const PAD = 5
@@ -26,7 +26,7 @@ export function drawKey(
   if (key.length === 0) return { left: 0, top: 0, right: 0, bottom: 0 }
   const line = axisSize + 3
   context.save()
-  context.font = `400 ${axisSize}px ${FONT}`
+  context.font = writeFont(axisSize)
   const wide = Math.max(...key.map((text) => context.measureText(text).width)) + 2 * PAD
   const high = key.length * line + 2 * PAD - 2
   const foot = axisSize + 8
