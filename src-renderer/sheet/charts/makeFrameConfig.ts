@@ -117,13 +117,18 @@ function makeDataset({ points, colour, width, dash, fill }: Curve): ChartDataset
 
 function makeFill(colour: string | ColourStops) {
   if (typeof colour === 'string') return colour
+  // Asked for each point of a line: one gradient serves as long as the plot stays where it is.
+  let known: { place: string; gradient: CanvasGradient } | null = null
   return ({ chart }: ScriptableContext<'line'>) => {
     const { left, top, right, bottom } = chart.chartArea ?? { left: 0, top: 0, right: 1, bottom: 1 }
+    const place = `${left} ${top} ${right} ${bottom}`
+    if (known?.place === place) return known.gradient
     const gradient =
       colour.along === 'y'
         ? chart.ctx.createLinearGradient(0, top, 0, bottom)
         : chart.ctx.createLinearGradient(left, 0, right, 0)
     for (const { share, colour: at } of colour.stops) gradient.addColorStop(share, at)
+    known = { place, gradient }
     return gradient
   }
 }
