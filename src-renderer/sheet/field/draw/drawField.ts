@@ -83,9 +83,10 @@ export function drawField(context: CanvasRenderingContext2D, model: FieldModel, 
 
 function drawSigns(
   context: CanvasRenderingContext2D,
-  { signs, palette }: FieldModel,
+  { signs, palette, axisSize }: FieldModel,
   scales: FieldScales,
 ): void {
+  const half = (SIGN * axisSize) / TYPE
   context.save()
   context.strokeStyle = palette.ink
   context.globalAlpha = 0.5
