@@ -21,6 +21,7 @@ export function listKey(result: PageResult, quantity: Quantity, contacts: readon
     key.push(`fronts under ${WEAKEST_FRONT} are left out`)
   }
   if (contacts.length > 0) key.push('thick bar: the contact carries force')
+  if (result.spalls.length > 0) key.push('double line: the bar has come apart')
   if (quantity === 'stress' && isOverAnywhere(result)) key.push('hatched: over the allowable')
   return key
 }

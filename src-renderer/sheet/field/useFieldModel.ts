@@ -59,6 +59,7 @@ export function useFieldModel(palette: Ref<Palette>): ComputedRef<FieldModel> {
       line: run.line.value,
       fronts: result?.wavefronts ?? [],
       contacts: contacts.value,
+      spalls: result?.spalls ?? [],
       signs: signs.value,
       governing: result && describeGoverning(result, view.units.value),
       key: result ? listKey(result, view.quantity.value, contacts.value) : [],

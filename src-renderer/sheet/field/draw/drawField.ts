@@ -18,7 +18,7 @@ const RING = 8
 
 /**
  * Draws what stands over the field's picture: grid, sections, signs, fronts with their numbers, contacts,
- * gauges, the governing ring with its chain lines, and the key.
+ * breaks, gauges, the governing ring with its chain lines, and the key.
  *
  * @param context - drawn into; one unit is one pixel of the page
  * @param model - what is shown
@@ -66,6 +66,7 @@ export function drawField(context: CanvasRenderingContext2D, model: FieldModel, 
   const fronts = listFrontLines(model.fronts, scales)
   drawFronts(context, fronts, ink)
   drawContacts(context, model, scales, ink)
+  drawSpalls(context, model, scales, ink)
 
   const taken = [...drawGoverning(context, model, scales, ink), ...drawGauges(context, model, scales, ink)]
   const keyBox = drawKey(context, model, scales, taken)
@@ -115,6 +116,23 @@ function drawContacts(
   context.fillStyle = ink
   for (const spell of contacts) {
     context.fillRect(x.at(spell.x) - half, t.at(spell.to), 2 * half, t.at(spell.from) - t.at(spell.to))
+  }
+}
+
+/** From the moment a bar comes apart on, two lines with paper between them. */
+function drawSpalls(
+  context: CanvasRenderingContext2D,
+  { spalls, palette }: FieldModel,
+  { x, t }: FieldScales,
+  ink: string,
+): void {
+  for (const spall of spalls) {
+    const [left, bottom] = [Math.round(x.at(spall.x)) - 2, t.at(spall.time)]
+    if (bottom <= 0) continue
+    context.fillStyle = ink
+    context.fillRect(left, 0, 4, bottom)
+    context.fillStyle = palette.paper
+    context.fillRect(left + 1, 0, 2, bottom)
   }
 }
 

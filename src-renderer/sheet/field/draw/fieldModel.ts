@@ -39,6 +39,8 @@ export interface FieldModel {
   line: LineDrawing | null
   fronts: readonly Wavefront[]
   contacts: readonly ContactSpell[]
+  /** Places [m] and times [s] at which bars came apart. */
+  spalls: readonly { x: number; time: number }[]
   signs: readonly SignMark[]
   governing: GoverningMark | null
   /** Lines of the key in the lower right corner. */
