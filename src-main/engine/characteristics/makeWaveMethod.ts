@@ -2,7 +2,7 @@ import type { Line } from '../line/line'
 import type { Fragment, MethodRun, NodeTrace, SpanExtremes, SpanPlace, Stock } from '../march/methodRun'
 import { advanceWaves } from './advanceWaves'
 import { makeWaveRun } from './makeWaveRun'
-import { readVelocities } from './readVelocities'
+import { readMotion } from './readMotion'
 import { readExtremes, readForces, readTrace, sumBlock, sumCells } from './readWaves'
 import type { LiveBlock, WaveRun } from './waveRun'
 
@@ -27,8 +27,11 @@ export function makeWaveMethod(line: Line): MethodRun {
     outside: run.outside,
     advance: (from, to) => advanceWaves(run, from, to),
     sumBar: (bar, k, frame) => sumBar(run, bar, k, frame),
-    makeForceReader: (places) => makePlaceReader(run, places, readForces),
-    makeVelocityReader: (places) => makePlaceReader(run, places, readVelocities),
+    makeForceReader: (places) => makeForceReader(run, places),
+    readMotion(span, k, force, velocity) {
+      const { block, at } = seat(span, 0)
+      readMotion(run, block, at, k, force, velocity)
+    },
     readWaves: (span) => seat(span, 0).block.delay?.line ?? null,
     readExtremes: (span) => cutExtremes(run, span),
     addProbe(span, position) {
@@ -47,11 +50,7 @@ export function makeWaveMethod(line: Line): MethodRun {
 }
 
 /** Gathers the places block by block, so that each block is read in one loop. */
-function makePlaceReader(
-  run: WaveRun,
-  places: readonly SpanPlace[],
-  read: typeof readForces,
-): (k: number, row: Float64Array) => void {
+function makeForceReader(run: WaveRun, places: readonly SpanPlace[]): (k: number, row: Float64Array) => void {
   const parts: { block: LiveBlock; positions: number[]; at: number }[] = []
   places.forEach(({ span, position }, i) => {
     const block = run.blocks.find((one) => span >= one.firstSpan && span <= one.lastSpan)!
@@ -62,7 +61,7 @@ function makePlaceReader(
   })
   const ready = parts.map((part) => ({ ...part, positions: Int32Array.from(part.positions) }))
   return (k, row) => {
-    for (const { block, positions, at } of ready) read(run, block, positions, k, row, at)
+    for (const { block, positions, at } of ready) readForces(run, block, positions, k, row, at)
   }
 }
 
@@ -120,6 +119,7 @@ function readNode(run: WaveRun, index: number): NodeTrace | null {
     forceLeft: left.force,
     velocityLeft: left.velocity,
     forceRight: right.force,
+    reaction: left.force,
     velocityRight: right.velocity,
   }
 }

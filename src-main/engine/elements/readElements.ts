@@ -9,7 +9,7 @@ type Reader = Pick<
   MethodRun,
   | 'sumBar'
   | 'makeForceReader'
-  | 'makeVelocityReader'
+  | 'readMotion'
   | 'readWaves'
   | 'readExtremes'
   | 'addProbe'
@@ -38,6 +38,14 @@ export function makeElementReader(line: Line, pieces: readonly Piece[], enter: (
     return { piece, node, slot: piece.first + node, face }
   }
 
+  /** Force at a seat after the latest step k, on the side of its span where two meet. */
+  function readSeat({ piece, slot, face }: ReturnType<typeof seat>, k: number): number {
+    if (face !== null) return face.force
+    if (slot === piece.first) return piece.left.force[k]
+    if (slot === piece.last) return piece.right.force[k]
+    return piece.stepper.keptForce(slot)
+  }
+
   return {
     sumBar(bar, k, frame) {
       enter()
@@ -55,18 +63,21 @@ export function makeElementReader(line: Line, pieces: readonly Piece[], enter: (
       return (k, row) =>
         seats.forEach(({ piece, slot, face }, i) => {
           if (face !== null) row[i] = face.force
-          else if (slot === piece.first) row[i] = piece.left.force[k]
-          else if (slot === piece.last) row[i] = piece.right.force[k]
+          else if (slot === piece.first) row[i] = piece.left.face[k]
+          else if (slot === piece.last) row[i] = piece.right.face[k]
           else row[i] = piece.stepper.keptForce(slot)
         })
     },
-    makeVelocityReader(places) {
-      const slots = Int32Array.from(places, ({ span, position }) => seat(span, position).slot)
-      return (_, row) => {
-        enter()
-        const { v } = elementKernel
-        for (let i = 0; i < slots.length; i++) row[i] = v[slots[i]]
-      }
+    readMotion(span, k, force, velocity) {
+      enter()
+      const { v } = elementKernel
+      const { cells } = line.spans[span]
+      const { slot, piece } = seat(span, 0)
+      const { stepper } = piece
+      for (let p = 0; p <= cells; p++) velocity[p] = v[slot + p]
+      for (let p = 1; p < cells; p++) force[p] = stepper.keptForce(slot + p)
+      force[0] = readSeat(seat(span, 0), k)
+      force[cells] = readSeat(seat(span, cells), k)
     },
     readWaves: () => null,
     readExtremes(span) {
@@ -100,8 +111,10 @@ export function makeElementReader(line: Line, pieces: readonly Piece[], enter: (
     readTrace(span, position): SpanTrace {
       const { piece, node, face } = seat(span, position)
       const strain = piece.strains.find((one) => one.position === node && one.span === span)?.strain
-      if (node === 0) return { ...piece.left, strain }
-      if (node === piece.last - piece.first) return { ...piece.right, strain }
+      if (node === 0) return { force: piece.left.face, velocity: piece.left.velocity, strain }
+      if (node === piece.last - piece.first) {
+        return { force: piece.right.face, velocity: piece.right.velocity, strain }
+      }
       return { ...piece.probes.find((probe) => probe.position === node && probe.face === face)!, strain }
     },
     readNode(node) {
@@ -110,10 +123,11 @@ export function makeElementReader(line: Line, pieces: readonly Piece[], enter: (
       const left = node === 0 ? pieces[0].left : pieces[line.spans[node - 1].bar].right
       const right = node === lastSpan ? left : pieces[line.spans[node].bar].left
       return {
-        forceLeft: left.force,
+        forceLeft: left.face,
         velocityLeft: left.velocity,
-        forceRight: right.force,
+        forceRight: right.face,
         velocityRight: right.velocity,
+        reaction: left.force,
       }
     },
     listFragments: () => [],

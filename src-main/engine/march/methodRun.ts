@@ -37,6 +37,8 @@ export interface NodeTrace {
   /** [N] tension positive */
   forceLeft: Float64Array
   forceRight: Float64Array
+  /** What the law passes from left to right [N]: its impulse counts. With elements that yield it stops the end node too. */
+  reaction: Float64Array
   /** [m/s] */
   velocityLeft: Float64Array
   velocityRight: Float64Array
@@ -105,10 +107,11 @@ export interface MethodRun extends Method {
    */
   makeForceReader(places: readonly SpanPlace[]): (k: number, row: Float64Array) => void
   /**
-   * The same for the velocity in the falling frame [m/s]; by elements that of half a step later. Where a
-   * bar came apart it is that of the right-hand face.
+   * Reads the force [N] and the velocity in the falling frame [m/s] at every position of a span after the
+   * latest step k, shape (cells + 1) each; by elements the velocity is that of half a step later. Only for
+   * a span whose waves the method does not keep. Where a bar came apart they are those of the right-hand face.
    */
-  makeVelocityReader(places: readonly SpanPlace[]): (k: number, row: Float64Array) => void
+  readMotion(span: number, k: number, force: Float64Array, velocity: Float64Array): void
   /** The waves of a span that the method keeps over the whole run; null where it keeps the latest step only. */
   readWaves(span: number): SpanWaves | null
   readExtremes(span: number): SpanExtremes

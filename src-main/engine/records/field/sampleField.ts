@@ -5,7 +5,7 @@ import { makeSpanPlace, type SpanPlace } from './spanPlace'
 /** Columns of samples at most, over all spans. */
 const COLUMNS = 1024
 /** Samples in time at most. */
-const ROWS = 2048
+const ROWS = 1024
 /** Positions read over the run at most, so that sampling a long run stays cheap beside marching it. */
 const MOST_READS = 20_000_000
 
@@ -60,26 +60,20 @@ export function makeFieldSamples(run: MethodRun): FieldSamples {
     )
     return { span, columns, force: makeSamples(), velocity: makeSamples(), places }
   })
-  const readers = spans.map(({ span }) => {
-    const places = Array.from({ length: line.spans[span].cells + 1 }, (_, position) => ({ span, position }))
-    return {
-      row: new Float64Array(places.length),
-      readForces: run.makeForceReader(places),
-      readVelocities: run.makeVelocityReader(places),
-    }
-  })
+  const rows = spans.map(({ span }) => ({
+    force: new Float64Array(line.spans[span].cells + 1),
+    velocity: new Float64Array(line.spans[span].cells + 1),
+  }))
 
   return {
     spans,
     stride,
     steps,
     record(index) {
-      spans.forEach(({ columns, force, velocity }, i) => {
-        const { row, readForces, readVelocities } = readers[i]
-        readForces(steps[index], row)
-        gather(row, force, index * columns, columns)
-        readVelocities(steps[index], row)
-        gather(row, velocity, index * columns, columns)
+      spans.forEach(({ span, columns, force, velocity }, i) => {
+        run.readMotion(span, steps[index], rows[i].force, rows[i].velocity)
+        gather(rows[i].force, force, index * columns, columns)
+        gather(rows[i].velocity, velocity, index * columns, columns)
       })
       return true
     },
@@ -113,6 +107,11 @@ function listSteps(count: number, stride: number): Int32Array {
 /** Gathers the extremes of a row of positions into columns. */
 function gather(row: Float64Array, { high, low }: Samples, at: number, columns: number): void {
   const positions = row.length
+  if (positions === columns) {
+    high.set(row, at)
+    low.set(row, at)
+    return
+  }
   for (let i = 0; i < columns; i++) {
     const from = Math.floor((i * positions) / columns)
     const to = Math.floor(((i + 1) * positions) / columns)
