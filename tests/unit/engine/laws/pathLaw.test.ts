@@ -1,12 +1,11 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import {
-  type LoadingCurve,
   makePowerCurve,
   makeStraightCurve,
   makeTableCurve,
 } from '../../../../src-main/engine/laws/loadingCurves'
-import { makePathLaw, type PathLaw } from '../../../../src-main/engine/laws/pathLaw'
+import { type LoadingCurve, makePathLaw, type PathLaw } from '../../../../src-main/engine/laws/pathLaw'
 
 const K = 2e8
 const straight = makeStraightCurve(K)
