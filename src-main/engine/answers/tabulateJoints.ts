@@ -9,13 +9,13 @@ const FORCELESS = 1e-9
 export function tabulateJoints(line: Line, record: RunRecord): JointTable[] {
   return line.rig.joints.map((joint, i) => {
     const [left, right] = [line.bars[i], line.bars[i + 1]]
-    const { forceLeft } = record.node(left.lastSpan + 1)!
+    const { forceLeft, reaction } = record.node(left.lastSpan + 1)!
     const { peakForce, first, count } = findContact(forceLeft)
     return {
       name: `${left.name} | ${right.name}`,
       kind: joint.kind,
       peakForce,
-      impulse: forceLeft.reduce((sum, F) => sum + F * line.dt, 0) + 0,
+      impulse: reaction.reduce((sum, F) => sum + F * line.dt, 0) + 0,
       closedFrom: first < 0 ? null : first * line.dt,
       contactTime: count * line.dt,
       energyLost: record.jointLoss[i],

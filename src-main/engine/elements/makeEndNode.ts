@@ -17,19 +17,24 @@ export function makeEndNode(
   steps: number,
 ): EndNode {
   const admittance = end === 'left' ? stepper.admittanceLeft : stepper.admittanceRight
+  const force = new Float64Array(steps + 1)
+  const face = stepper.linear ? force : new Float64Array(steps + 1)
+  const element = end === 'left' ? slot : slot - 1
   const node: EndNode = {
     velocityNow: elementKernel.v[slot],
-    force: new Float64Array(steps + 1),
+    force,
+    face,
     velocity: new Float64Array(steps + 1),
     side: {
       admittance: (k) => (admittance * beat.duration(k)) / beat.dt,
       freeVelocity: () => node.velocityNow + (end === 'left' ? stepper.kickLeft : stepper.kickRight),
       lastVelocity: () => node.velocityNow,
-      take(k, force, velocity) {
-        node.force[k] = force
+      take(k, reaction, velocity) {
+        force[k] = reaction
+        if (!stepper.linear) face[k] = stepper.elementForce(element)
         node.velocity[k] = evaluateWorking(beat, velocity, node.velocityNow)
         node.velocityNow = velocity
-        elementKernel.widen(slot, force, k)
+        elementKernel.widen(slot, face[k], k)
       },
     },
   }

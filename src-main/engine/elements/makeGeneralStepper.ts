@@ -100,6 +100,7 @@ export function makeGeneralStepper(piece: GeneralPiece): Stepper {
   }
 
   return {
+    linear: !piece.finiteStrain && material.every((one) => one.yield === Infinity),
     get kickLeft() {
       return kick[0]
     },

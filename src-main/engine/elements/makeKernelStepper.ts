@@ -30,6 +30,7 @@ export function makeKernelStepper(piece: KernelPiece): Stepper {
   let kickRight = 0
 
   return {
+    linear: hardening === null,
     get kickLeft() {
       return kickLeft
     },

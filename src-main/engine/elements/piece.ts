@@ -61,8 +61,14 @@ export interface EndNode {
   side: Side
   /** Velocity found for the step under way, or the initial one [m/s]. */
   velocityNow: number
-  /** Shape (steps + 1) [N]. */
+  /** Force of the law on the node, shape (steps + 1) [N]. */
   force: Float64Array
+  /**
+   * Force on the bar's face, shape (steps + 1) [N]: that of the law where the bar is linear. Where it is
+   * not, the force of the element beside the node; the law's also stops the node's own mass, at rho c v
+   * however soft the bar has become.
+   */
+  face: Float64Array
   /** Working velocity in the falling frame, shape (steps + 1) [m/s]. */
   velocity: Float64Array
 }
@@ -83,6 +89,8 @@ export interface PieceStep {
 
 /** How a piece takes a step: forces inside first, then, once the laws have closed its ends, motion. */
 export interface Stepper {
+  /** True where every element is linear. */
+  readonly linear: boolean
   /** Finds what the forces inside and the loads do at step k; `share` of a step is 1/2 at k = 0. */
   prepare(k: number, share: number): void
   /** Velocity change of an end node by the forces inside, after `prepare` [m/s]. */

@@ -25,7 +25,7 @@ export function traceNode(run: MethodRun, index: number): NodeTrace | null {
 export function sumEnd(trace: NodeTrace, n: 1 | -1, dt: number): Omit<EndRecord, 'bodyVelocity'> {
   let impulse = 0
   let work = 0
-  trace.forceLeft.forEach((F, k) => {
+  trace.reaction.forEach((F, k) => {
     impulse += n * F * dt
     work += n * F * trace.velocityLeft[k] * dt
   })

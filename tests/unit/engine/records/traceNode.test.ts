@@ -46,7 +46,8 @@ describe('the trace at a node', () => {
 
   it('sums what the surroundings did to the bar: impulse n F dt, work n F v dt', () => {
     const trace = {
-      forceLeft: Float64Array.of(2, -3),
+      forceLeft: new Float64Array(2),
+      reaction: Float64Array.of(2, -3),
       velocityLeft: Float64Array.of(5, 7),
       forceRight: new Float64Array(2),
       velocityRight: new Float64Array(2),
