@@ -17,6 +17,8 @@ export interface FigureWord {
   quiet?: boolean
   size?: number
   align?: 'left' | 'center' | 'right'
+  /** Room that it has; longer words are cut short [px]. */
+  room?: number
 }
 
 /** A picture as it is saved: charts, and the words that stand around them on the sheet. */
@@ -45,11 +47,18 @@ export function drawFigure(
 ): void {
   parts.forEach(place)
   context.textBaseline = 'alphabetic'
-  for (const { text, x, y, strong, quiet, size, align } of words) {
+  for (const { text, x, y, strong, quiet, size, align, room } of words) {
     context.font = writeFont(size ?? inks.size + 1, strong ? 600 : 400)
     context.fillStyle = quiet ? inks.unit : inks.ink
     context.textAlign = align ?? 'left'
-    context.fillText(text, x, y)
+    context.fillText(shorten(context, text, room ?? Infinity), x, y)
   }
   draw?.(context)
+}
+
+function shorten(context: CanvasRenderingContext2D, text: string, room: number): string {
+  if (context.measureText(text).width <= room) return text
+  let length = text.length - 1
+  while (length > 1 && context.measureText(`${text.slice(0, length)}…`).width > room) length--
+  return `${text.slice(0, length)}…`
 }

@@ -13,6 +13,9 @@ export function saveFile(name: string, content: Blob): void {
   setTimeout(() => URL.revokeObjectURL(address), 10_000)
 }
 
+/** Control characters, signs of paths, and marks that turn the direction of writing. */
+const REFUSED = /[\u0000-\u001f\u007f<>:"/\\|?*\u200e\u200f\u202a-\u202e\u2066-\u2069]+/g
+
 /**
  * Makes a file name of a title.
  *
@@ -21,9 +24,7 @@ export function saveFile(name: string, content: Blob): void {
  */
 export function makeFileName(...parts: string[]): string {
   const name = parts
-    .map((part) =>
-      part.replace(/[\u0000-\u001f\u007f<>:"/\\|?*\u200e\u200f\u202a-\u202e\u2066-\u2069]+/g, ' ').trim(),
-    )
+    .map((part) => part.replace(REFUSED, ' ').replace(/\s+/g, ' ').trim())
     .filter((part) => part !== '')
     .join(' - ')
   return name.replace(/^\.+|\.+$/g, '').slice(0, 120) || 'chart'

@@ -15,6 +15,8 @@ interface MarginLabel {
   governs: boolean
   from: number
   to: number
+  /** Where it is reached [m]. */
+  at: number
   sense: 'tension' | 'compression'
 }
 
@@ -74,7 +76,7 @@ export function drawMargins(plot: Plot, result: PageResult, bounds: readonly Bou
       break
     }
 
-    function listPlaces({ sense, governs, negative }: MarginLabel, width: number): Label['places'] {
+    function listPlaces({ sense, governs, negative, at }: MarginLabel, width: number): Label['places'] {
       const middle = (left + right) / 2
       const zero = Math.min(area.bottom, Math.max(area.top, y.at(0)))
       const far = sense === 'tension' ? area.top + height / 2 + 3 : area.bottom - height / 2 - 3
@@ -83,7 +85,14 @@ export function drawMargins(plot: Plot, result: PageResult, bounds: readonly Bou
       const inside = [middle, left + (right - left) / 4, right - (right - left) / 4]
       const beside = [1, 2, 3].flatMap((n) => [right + n * (width / 2 + EDGE), left - n * (width / 2 + EDGE)])
       // A negative margin is never left out: where its section is too narrow it stands beside it.
-      const columns = governs || (negative && right - left < width) ? [...beside, middle] : inside
+      const leader = x.at(at)
+      const near = [leader + width / 2 + 10, leader - width / 2 - 10]
+      const isNarrow = right - left < width
+      const columns = governs
+        ? [...near, ...beside, middle]
+        : negative && isNarrow
+          ? [...beside, middle]
+          : inside
       if (negative) columns.push(...beside)
       return columns.flatMap((column) => rows.map((row) => ({ x: column, y: row })))
     }
@@ -136,6 +145,7 @@ function listLabels({ sections, governing }: PageResult): MarginLabel[] {
           governs,
           from,
           to,
+          at: peaks[sense].localAt,
           sense,
         },
       ]

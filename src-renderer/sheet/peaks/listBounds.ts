@@ -34,6 +34,16 @@ export function listBounds(
   return bounds
 }
 
+/**
+ * Largest nominal stress of either sense.
+ *
+ * @param sections - of a result
+ * @returns zero or positive [Pa]
+ */
+export function findLargestNominal(sections: PageResult['sections']): number {
+  return Math.max(0, ...sections.flatMap(({ tension, compression }) => [tension.peak, -compression.peak]))
+}
+
 /** Bounds further out than this many times the largest stress are told in words: they would flatten the curves. */
 const FAR = 4
 

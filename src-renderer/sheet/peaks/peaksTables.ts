@@ -1,6 +1,5 @@
 import type { PageResult } from '../../../src-main/contract/bridge'
 import type { SensePeak } from '../../../src-main/contract/result'
-import { formatMargin } from '../../format/formatMargin'
 import { findFrom } from '../../plot/thinTrace'
 import type { ChartTable, Column } from '../charts/chartTable'
 
@@ -25,7 +24,7 @@ export function makeSectionsTable(sections: PageResult['sections']): ChartTable 
     columns: [
       { heading: 'section', dimension: null, at: (row) => rows[row].name },
       { heading: 'sense', dimension: null, at: (row) => rows[row].sense },
-      of('margin', null, ({ margin }) => formatMargin(margin)),
+      of('margin', 'ratio', ({ margin }) => margin),
       of('peak', 'stress', ({ peak }) => peak),
       of('at x', 'length', ({ at }) => at),
       of('at t', 'time', ({ time }) => time),

@@ -47,6 +47,9 @@ export function findStep(
   return (nearest as { make: () => StepView } | null)?.make() ?? null
 }
 
+/** How close to 1 the way there and back through a taper without a step comes. */
+const SMOOTH = 1e-9
+
 function viewStep({ name, x, fromLeft, fromRight }: PageResult['interfaces'][number]): StepView {
   const row = (label: string, quantity: 'Energy' | 'Stress' | 'Force', strong = false): RatioRow => ({
     name: label,
@@ -88,8 +91,9 @@ function viewTaper({ name, from, to, shortPulse, longPulse }: TaperAnswer): Step
   const short: RatioPair = {
     fromLeft: { reflected: shortPulse.reflectedForce, transmitted: shortPulse.transmittedForce },
     fromRight: {
-      // What the last of several small steps reflects to the right is not among the answers.
-      reflected: shortPulse.reflectedForce === 0 ? 0 : null,
+      // Without a step in it or at its ends a taper lets a short pulse pass by T there and 1 / T back, and
+      // reflects none of it; where a step is, what it reflects to the right is not among the answers.
+      reflected: Math.abs(shortPulse.transmittedForce ** 2 * back - 1) < SMOOTH ? 0 : null,
       transmitted: shortPulse.transmittedForce * back,
     },
   }

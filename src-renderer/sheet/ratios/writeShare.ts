@@ -3,10 +3,10 @@
  *
  * @param share - of what arrives; null where it is not known
  * @param signed - whether a plus is written
- * @returns such as `+0.385`
+ * @returns such as `+0.385`; a dash without a share
  */
 export function writeShare(share: number | null, signed: boolean): string {
-  if (share === null) return 'none given'
+  if (share === null) return '–'
   const text = Math.abs(share).toFixed(3)
   const sign = Number(text) === 0 ? '' : share < 0 ? '−' : signed ? '+' : ''
   return sign + text

@@ -1,24 +1,37 @@
 import type { PulseWindow } from './pulseWindow'
 
+/** What is said of a trace, whatever the moment. */
+export interface TraceNote {
+  text: string
+  /** The same for a narrow trace. */
+  short: string
+  /** True where it is a warning. */
+  alarm: boolean
+}
+
 /**
  * Says of the first pulse whether it is seen alone.
  *
  * @param window - of the pulse; null where nothing passes
  * @param end - of the run [s]
- * @returns one short line, and whether it is a warning
  */
-export function describeWindow(window: PulseWindow | null, end: number): { text: string; alarm: boolean } {
-  if (!window) return { text: 'nothing passes', alarm: false }
+export function describeWindow(window: PulseWindow | null, end: number): TraceNote {
+  if (!window) return { text: 'nothing passes', short: 'nothing passes', alarm: false }
   const { to, spare } = window
   if (spare === null) {
-    return {
-      text: to < end * (1 - 1e-9) ? 'pulse fits, none returns' : 'pulse outlasts the run',
-      alarm: false,
-    }
+    return to < end * (1 - 1e-9)
+      ? { text: 'pulse fits, none returns', short: 'fits', alarm: false }
+      : { text: 'pulse outlasts the run', short: 'outlasts run', alarm: false }
   }
-  return spare < 0
-    ? { text: `pulse overlaps by ${writeDuration(-spare)}`, alarm: true }
-    : { text: `pulse fits, ${writeDuration(spare)} spare`, alarm: false }
+  if (spare < 0) {
+    const by = writeDuration(-spare)
+    return { text: `pulse overlaps by ${by}`, short: `overlaps ${by}`, alarm: true }
+  }
+  return {
+    text: `pulse fits, ${writeDuration(spare)} spare`,
+    short: `fits, ${writeDuration(spare)}`,
+    alarm: false,
+  }
 }
 
 /**

@@ -20,6 +20,7 @@ export interface JointTrace {
  *
  * @param trace - in the range of time that is shown
  * @param contacts - when it carries force [s]
+ * @param peak - force of largest magnitude in the whole run, so that the axis stays as it is under zoom [N]
  * @param frame - shared by all traces
  * @param width - of the plot [px]
  * @param frozen - the same joint of a run laid under; null for none
@@ -27,13 +28,14 @@ export interface JointTrace {
 export function makeContactSpec(
   trace: JointTrace,
   contacts: Stretch[],
+  peak: number,
   frame: TraceFrame,
   width: number,
   frozen: JointTrace | null,
 ): FrameSpec {
   const { fromT, toT, height, inks } = frame
-  let low = 0
-  let high = 0
+  let low = Math.min(0, peak)
+  let high = Math.max(0, peak)
   for (const { force } of frozen ? [trace, frozen] : [trace]) {
     for (const value of force) {
       low = Math.min(low, value)

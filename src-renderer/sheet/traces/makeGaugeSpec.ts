@@ -120,18 +120,18 @@ function drawPeak(
 ): void {
   const at = y.at(from)
   if (at < area.top || at > area.bottom) return
-  const below = at + inks.size / 2 + 4
-  const left = value < 0
-  drawHaloText(
-    context,
-    words,
-    x.at(0) + (left ? 6 : -6),
-    below + inks.size / 2 > area.bottom ? at - inks.size / 2 - 3 : below,
-    {
-      font: writeFont(inks.size, 600),
-      ink: inks.ink,
-      halo: inks.paper,
-      align: left ? 'left' : 'right',
-    },
-  )
+  const half = inks.size / 2
+  const below = at + half + 4
+  const font = writeFont(inks.size, 600)
+  context.font = font
+  const width = context.measureText(words).width
+  // On the side that the pulse leaves free, but within the plot.
+  const left =
+    value < 0 ? Math.min(x.at(0) + 6, area.right - width - 6) : Math.max(x.at(0) - 6 - width, area.left + 6)
+  drawHaloText(context, words, left, below + half > area.bottom ? at - half - 3 : below, {
+    font,
+    ink: inks.ink,
+    halo: inks.paper,
+    align: 'left',
+  })
 }

@@ -32,12 +32,19 @@ export function makeTracesFigure(
   const end = columns.at(-1)!
   const words: FigureWord[] = [{ text: title, x: EDGE, y: 20, strong: true, size: inks.size + 3 }]
   const column = inks.size + 5
-  for (const { item, left } of columns) {
+  for (const { item, left, width: room } of columns) {
     const x = LEFT + left - start
-    words.push({ text: `${item.name} ${item.where}`, x, y: TOP - 2 * column - 8, strong: true })
+    words.push({ text: `${item.name} ${item.where}`, x, y: TOP - 2 * column - 8, strong: true, room })
     const value = formatQuantity(moment === null ? null : item.at(moment), item.dimension, units)
-    words.push({ text: `${value.text} ${value.unit}`, x, y: TOP - column - 8 })
-    words.push({ text: item.note.text, x, y: TOP - 8, strong: item.note.alarm, quiet: !item.note.alarm })
+    words.push({ text: `${value.text} ${value.unit}`, x, y: TOP - column - 8, room })
+    words.push({
+      text: item.note.text,
+      x,
+      y: TOP - 8,
+      strong: item.note.alarm,
+      quiet: !item.note.alarm,
+      room,
+    })
   }
   const plot = spec.height - spec.pads.bottom
   const at = (t: number): number => TOP + plot - ((t - y.from) / (y.to - y.from)) * plot

@@ -1,6 +1,7 @@
 import type { UnitDimension } from '../../format/units'
 import type { ChartTable } from '../charts/chartTable'
 import type { FrameSpec } from '../charts/frameSpec'
+import type { TraceNote } from './describeWindow'
 
 /** A trace on the sheet. */
 export interface TraceItem {
@@ -12,8 +13,7 @@ export interface TraceItem {
   /** Place on the line [m]; null for the whole of it. */
   x: number | null
   dimension: UnitDimension
-  /** What is said of it, whatever the moment. */
-  note: { text: string; alarm: boolean }
+  note: TraceNote
   /** Its value at a moment; null where there is none. */
   at(moment: number): number | null
   /** What it shows, in words. */

@@ -16,6 +16,10 @@ export interface JointReading {
   trace: JointTrace
   /** When it carries force [s]. */
   contacts: Stretch[]
+  /** Force of largest magnitude in the whole run [N]. */
+  peak: number
+  /** The run that it was read from; null before it is. */
+  result: PageResult | null
 }
 
 /** Share of a joint's largest force up to which it carries none. */
@@ -59,6 +63,8 @@ export function useJointTraces(): {
             name: joint.name,
             kind,
             trace: readTrace(values, fromT, toT),
+            result,
+            peak: joint.peakForce,
             contacts: listSpells(values, REST * Math.abs(joint.peakForce), fromT, toT),
           },
         ]
@@ -74,8 +80,20 @@ export function useJointTraces(): {
       readings.value = answer
       earlier.set(result, answer)
     },
-    () => (readings.value = []),
+    () => (readings.value = listUnread()),
   )
+
+  /** Joints of the line before their force has come: what is known of those of the same name, or nothing. */
+  function listUnread(): JointReading[] {
+    const known = new Map(readings.value.map((reading) => [reading.name, reading]))
+    return (run.line.value?.joints ?? []).flatMap(({ kind }, i): JointReading[] => {
+      const joint = run.result.value?.joints[i]
+      if (kind === 'bonded' || !joint) return []
+      const { name, peakForce: peak } = joint
+      return [known.get(name) ?? { name, kind, trace: readTrace([], 0, 1), contacts: [], peak, result: null }]
+    })
+  }
+
   watch(
     [run.result, view.fromT, view.toT, () => layout.field.height],
     () => {
@@ -85,6 +103,7 @@ export function useJointTraces(): {
         readings.value = []
         return
       }
+      readings.value = listUnread()
       latest.ask({
         result,
         fromT: view.fromT.value,

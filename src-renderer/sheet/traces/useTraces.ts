@@ -22,6 +22,9 @@ import { findLargest, TRACE_QUANTITY } from './traceQuantity'
 import { makeEnergyTable, makeGaugeTable, makeJointTable } from './traceTables'
 import { useJointTraces, type JointReading } from './useJointTraces'
 
+/** Share of the largest value under which another one is rounding. */
+const ROUNDING = 1e-12
+
 /** Between traces [px]. */
 export const GAP = 8
 
@@ -46,6 +49,7 @@ export function useTraces(): {
     inks: inks.value,
     units: view.units.value,
   }))
+  const staleInks = useInks(true)
   const quantity = computed(() => TRACE_QUANTITY[view.quantity.value])
   const limit = computed(() => {
     const gauges = run.result.value?.gauges ?? []
@@ -79,7 +83,11 @@ export function useTraces(): {
       x: gauge.x,
       dimension: quantity.value,
       note,
-      at: (moment) => readNearest(gauge.t, gauge[quantity.value], moment),
+      at: (moment) => {
+        const value = readNearest(gauge.t, gauge[quantity.value], moment)
+        // What rounding leaves beside the values of this run reads 0.
+        return value !== null && Math.abs(value) < ROUNDING * limit.value ? 0 : value
+      },
       summary: `${quantity.value} over time at ${local.text} ${local.unit} on ${bar?.name ?? 'the line'}; ${note.text}`,
       table: () => makeGaugeTable(gauge, frame.value),
       claim: { wanted: 126, least: 92 },
@@ -93,14 +101,20 @@ export function useTraces(): {
     const { frozen, result } = run
     const under = frozen.value && frozen.value !== result.value ? earlier.get(frozen.value) : undefined
     const first = contacts.at(0)
-    const text = first ? `first ${writeDuration(first.to - first.from)}` : 'carries nothing'
+    const lasts = first ? writeDuration(first.to - first.from) : ''
+    const said = first ? `first ${lasts}` : reading.peak === 0 ? 'carries nothing' : 'none in view'
+    const text = reading.result === result.value ? said : 'being read'
+    // A reading that is still that of the run before is drawn as stale.
+    const shown = reading.result === result.value ? frame.value : { ...frame.value, inks: staleInks.value }
+    const kindName = kind[0].toUpperCase() + kind.slice(1)
+    const alone = readings.value.length === 1
     return {
       key: `joint ${name}`,
-      name: kind[0].toUpperCase() + kind.slice(1),
-      where: name,
+      name: alone ? kindName : name,
+      where: alone ? name : kind,
       x: drawn?.x ?? null,
       dimension: 'force',
-      note: { text, alarm: false },
+      note: { text, short: text, alarm: false },
       at: (moment) => readNearest(trace.t, trace.force, moment),
       summary: `force over time in the ${kind} ${name}; ${text}`,
       table: () => makeJointTable(reading, frame.value),
@@ -109,7 +123,8 @@ export function useTraces(): {
         makeContactSpec(
           trace,
           contacts,
-          frame.value,
+          reading.peak,
+          shown,
           width,
           under?.find((it) => it.name === name)?.trace ?? null,
         ),
@@ -130,7 +145,7 @@ export function useTraces(): {
       where: '',
       x: null,
       dimension: 'energy',
-      note: { text: `of ${total.text} ${total.unit}`, alarm: false },
+      note: { text: `of ${total.text} ${total.unit}`, short: `of ${total.text}`, alarm: false },
       at: (moment) => {
         const kinetic = readNearest(energy.t, energy.kinetic, moment)
         const strain = readNearest(energy.t, energy.strain, moment)

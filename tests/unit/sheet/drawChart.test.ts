@@ -1,26 +1,8 @@
 import { describe, expect, it } from 'vitest'
 import { drawChart } from '../../../src-renderer/sheet/charts/drawChart'
 import type { FrameSpec, Plot } from '../../../src-renderer/sheet/charts/frameSpec'
-import { makeInks } from '../../../src-renderer/sheet/charts/inks'
 import { SvgContext } from '../../../src-renderer/sheet/charts/svg/svgContext'
-
-const grey = '#102030'
-const inks = makeInks(
-  {
-    theme: 'light',
-    paper: '#ffffff',
-    drawer: grey,
-    ink: grey,
-    unit: grey,
-    stale: grey,
-    rule: grey,
-    grid: grey,
-    accent: grey,
-    wash: grey,
-  },
-  false,
-  11,
-)
+import { testInks as inks } from './testInks'
 
 function makeSpec(changes: Partial<FrameSpec> = {}): FrameSpec {
   return {
