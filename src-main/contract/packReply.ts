@@ -29,17 +29,28 @@ const align = (offset: number) => Math.ceil(offset / 8) * 8
 export function packReply(reply: BridgeReply): Uint8Array<ArrayBuffer> {
   const arrays: PackedArray[] = []
   const parts: (Float64Array | Float32Array)[] = []
-  const cut = (value: unknown, path: (string | number)[]): unknown => {
+  const path: PackedArray['path'] = []
+  const cutAt = (key: string | number, value: unknown): unknown => {
+    path.push(key)
+    const rest = cut(value)
+    path.pop()
+    return rest
+  }
+  const cut = (value: unknown): unknown => {
+    if (typeof value !== 'object' || value === null) return value
     if (value instanceof Float64Array || value instanceof Float32Array) {
-      arrays.push({ path, kind: value instanceof Float64Array ? 'f8' : 'f4', length: value.length })
+      arrays.push({
+        path: [...path],
+        kind: value instanceof Float64Array ? 'f8' : 'f4',
+        length: value.length,
+      })
       parts.push(value)
       return null
     }
-    if (Array.isArray(value)) return value.map((entry, i) => cut(entry, [...path, i]))
-    if (typeof value !== 'object' || value === null) return value
-    return Object.fromEntries(Object.entries(value).map(([key, entry]) => [key, cut(entry, [...path, key])]))
+    if (Array.isArray(value)) return value.map((entry, i) => cutAt(i, entry))
+    return Object.fromEntries(Object.entries(value).map(([key, entry]) => [key, cutAt(key, entry)]))
   }
-  const header: Header = { reply: cut(reply, []) as BridgeReply, arrays }
+  const header: Header = { reply: cut(reply) as BridgeReply, arrays }
   const text = new TextEncoder().encode(JSON.stringify(header))
   const size = parts.reduce((offset, part) => align(offset) + part.byteLength, 4 + text.length)
   const bytes = new Uint8Array(size)

@@ -17,7 +17,7 @@ describe.skipIf(!canPack)(`the packed program (${howPacked})`, () => {
   }, 180_000)
   afterAll(() => packed?.remove())
 
-  it('holds the built program, its licence, and nothing else', () => {
+  it('holds the built program, its samples and licence, and nothing else', () => {
     const files = listPackage(packed.find('app.asar'), { isPack: false }).map((path) =>
       path.replaceAll(sep, '/'),
     )
@@ -31,7 +31,7 @@ describe.skipIf(!canPack)(`the packed program (${howPacked})`, () => {
       '/out/renderer/index.html',
     ]
     expect(files).toEqual(expect.arrayContaining(needed))
-    const known = /^\/(package\.json|LICENSE|out(\/(main|preload|renderer)(\/.*)?)?)$/
+    const known = /^\/(package\.json|LICENSE|samples(\/.*)?|out(\/(main|preload|renderer)(\/.*)?)?)$/
     expect(files.filter((path) => !known.test(path))).toEqual([])
     const manifest = JSON.parse(readFileSync(join(packed.app, 'package.json'), 'utf8')) as { main: string }
     expect(existsSync(join(packed.app, manifest.main))).toBe(true)
@@ -43,7 +43,7 @@ describe.skipIf(!canPack)(`the packed program (${howPacked})`, () => {
     }
   })
 
-  it('brings the samples', () => {
+  it('brings the samples beside it too, where a user finds them', () => {
     const samples = packed.find('samples')
     expect(readdirSync(samples).sort()).toEqual(readdirSync(join(top, 'samples')).sort())
   })

@@ -23,6 +23,17 @@ function makeStepped(
 const makeTapered = (): Rig =>
   makeStepped({}, [makeSection(0.4, 4e-4), makeSection(0.6, (s) => 4e-4 * (1 - s) + 1e-4 * s)])
 
+/** The pulse of a short striker turns into tension at the free end and breaks a bar of 100 MPa. */
+function makeSpalling(): Rig {
+  const material = { ...ROUND_STEEL, spall: 100e6 }
+  const bars = [
+    makeBar('striker', [makeSection(0.2, 4e-4)], { velocity: () => 8, uniformVelocity: 8 }),
+    makeBar('rod', [makeSection(0.8, 4e-4, { material })]),
+  ]
+  const rig = makeRig(bars, { duration: 0.5e-3, cell: 5e-3 })
+  return { ...rig, run: { ...rig.run, spall: true } }
+}
+
 function solve(rig: Rig, full = true): { field: RunField; solution: Solution; dt: number; steps: number } {
   const solve = makeSolve(rig, { full, field: true })
   solve.advance(solve.steps)
@@ -45,9 +56,11 @@ describe('the field of a run', () => {
     ['uniform sections', makeStepped()],
     ['a taper', makeTapered()],
     ['elements', makeStepped({ method: 'elements' })],
+    ['a bar that comes apart', makeSpalling()],
   ])('has the values of the full record at each place and step: %s', (_, rig) => {
     const { field, solution, dt } = solve(rig)
     const { x, t, stress } = solution.field
+    expect(solution.spalls.length > 0).toBe(rig.run.spall)
     for (let k = 1; k < t.length; k += 7) {
       // Faces stand twice in the record, and a pixel shows both.
       for (let i = 1; i < x.length - 1; i += 11) {
@@ -57,6 +70,18 @@ describe('the field of a run', () => {
         expect(Math.abs(low - stress[k][i])).toBeLessThanOrEqual(1.2e-7 * Math.abs(stress[k][i]))
         expect(high).toBe(low)
       }
+    }
+  })
+
+  it('has the velocity that a gauge on a taper has', () => {
+    const rig = { ...makeTapered(), gauges: [{ name: 'G', bar: 0, at: 0.7, bridge: null }] }
+    const { field, solution, dt } = solve(rig)
+    const [gauge] = solution.gauges
+    for (let k = 1; k < gauge.t.length; k += 9) {
+      const [low] = field.readTile(around('velocity', gauge.x, k * dt))
+      expect(Math.abs(low - gauge.velocity[k])).toBeLessThanOrEqual(
+        1.2e-7 * Math.abs(gauge.velocity[k]) + 1e-12,
+      )
     }
   })
 
