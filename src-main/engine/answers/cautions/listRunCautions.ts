@@ -8,7 +8,13 @@ import { describeQuantity } from './describeQuantity'
 import { joinPlaces } from './joinPlaces'
 
 const ROUNDING = 0.005
+/** Largest closure of a sound run. */
 const CLOSURE = 1e-9
+/**
+ * The same of energy with finite strain: central difference does not keep the energy of a law that is not straight.
+ * Sharp impacts at 1 to 50 m/s close to 3e-6 to 2e-4 on 20 cells, and nearer on more.
+ */
+const FINITE_STRAIN_CLOSURE = 1e-3
 const LAST = 0.02
 /** Share of the largest stress under which a late peak elsewhere is not worth a word. */
 const FAINT = 0.05
@@ -28,7 +34,7 @@ export function listRunCautions(
 ): Caution[] {
   return [
     ...listLeftOut(line.rig),
-    ...listClosure(record),
+    ...listClosure(line, record),
     ...listShortRun(line, sections),
     ...listRounding(line),
     {
@@ -64,15 +70,16 @@ function listLeftOut({ run, bars }: Rig): Caution[] {
   ]
 }
 
-function listClosure({ energy }: Pick<RunRecord, 'energy'>): Caution[] {
-  const worst = Math.max(energy.closure, energy.momentumClosure)
-  if (worst <= CLOSURE) return []
+function listClosure({ rig }: Line, { energy }: Pick<RunRecord, 'energy'>): Caution[] {
+  const allowed = rig.run.finiteStrain && rig.run.method === 'elements' ? FINITE_STRAIN_CLOSURE : CLOSURE
+  if (energy.closure <= allowed && energy.momentumClosure <= CLOSURE) return []
   return [
     {
       code: 'energy-closure',
       message:
         `Energy closes only to ${energy.closure.toExponential(1)} and momentum to ${energy.momentumClosure.toExponential(1)} ` +
-        'of the largest at play, where 1e-9 is expected. Do not rely on this run; report the rig.',
+        `of the largest at play, where ${allowed.toExponential()} and ${CLOSURE.toExponential()} are expected. ` +
+        'Do not rely on this run; report the rig.',
       where: '',
     },
   ]
