@@ -145,6 +145,7 @@ function guardPage(bridge: Bridge, rig: Rig, page: Window): void {
 function nameFile(title: string): string {
   const plain = title
     .normalize('NFKD')
+    .replace(/\p{M}/gu, '')
     .toLowerCase()
     .replace(/[^a-z0-9]+/g, '-')
     .replace(/^-+|-+$/g, '')

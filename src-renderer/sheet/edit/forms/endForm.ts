@@ -28,7 +28,7 @@ const PULSES: Record<string, PulseDimension> = {
 const STARTS: Record<string, PartDocument> = {
   mass: { mass: '2 kg' },
   support: { stiffness: '100 kN/mm' },
-  penetration: { loading: '20 kN/mm' },
+  penetration: { loading: '20 kN/mm', unloading: '20 kN/mm' },
 }
 
 /**
@@ -74,7 +74,7 @@ export function makeEndForm(document: RigDocument, path: string): PartForm {
   if (kind === 'penetration') {
     row.push(
       value(`${path}.loading`, 'Stiffness going in'),
-      value(`${path}.unloading`, 'Coming back', 'the same'),
+      value(`${path}.unloading`, 'Coming back'),
     )
   }
   if (kind === 'mass' || kind === 'support' || kind === 'wall') row.push(value(`${path}.gap`, 'Gap', 'none'))
