@@ -25,7 +25,7 @@ const pressesOnly = (end: End) => end.kind === 'wall' || ('joint' in end && end.
 
 describe('random lines', () => {
   it('never give a number that is none, and close their ledgers of energy and momentum', () => {
-    check(150, makeRigs(), (rig) => {
+    check(100, makeRigs(), (rig) => {
       const { record, broken } = marchRig(rig)
       expect(broken).toBe(false)
       const { envelope, energy, field, bars, jointLoss, ends } = record
@@ -49,14 +49,14 @@ describe('random lines', () => {
         jointLoss,
         [ends.left.impulse, ends.left.work, ends.right.impulse, ends.right.work],
       ]
-      expect(all.every((values) => Array.from(values).every(Number.isFinite))).toBe(true)
+      expect(all.every((values) => Number.isFinite(findWorst(values)))).toBe(true)
       expect(energy.closure).toBeLessThan(1e-12)
       expect(energy.momentumClosure).toBeLessThan(1e-12)
     })
   })
 
   it('gain no energy that no work has brought, and lose none without saying where', () => {
-    check(80, makeRigs(), (rig) => {
+    check(60, makeRigs(), (rig) => {
       const { kinetic, strain, dissipated, work } = marchRig(rig).record.energy
       const largest = Math.max(findWorst(kinetic) + findWorst(strain), findWorst(work), 1e-9)
       const start = kinetic[0] + strain[0] + dissipated[0] - work[0]
@@ -68,7 +68,7 @@ describe('random lines', () => {
   })
 
   it('change the energy of their bars only by what passes at the faces: an account apart from the ledgers', () => {
-    check(80, makeRigs({ gravity: false }), (rig) => {
+    check(60, makeRigs({ gravity: false }), (rig) => {
       const { line, record } = marchRig(rig)
       const short = marchRig({ ...rig, run: { ...rig.run, duration: line.dt } }).record
       const sum = (bars: typeof record.bars) =>
@@ -90,7 +90,7 @@ describe('random lines', () => {
   })
 
   it('never pull over a contact, nor over a cushion that does not pull', () => {
-    check(80, makeRigs(), (rig) => {
+    check(60, makeRigs(), (rig) => {
       const { line, record } = marchRig(rig)
       const pulls = (node: number) => Math.max(...record.node(node)!.forceLeft)
       rig.joints.forEach((joint, i) => {
@@ -106,7 +106,7 @@ describe('random lines', () => {
   })
 
   it('seen in a mirror give the mirrored answer', () => {
-    check(80, makeRigs({ mostSteps: 250 }), (rig) => {
+    check(60, makeRigs({ mostSteps: 250 }), (rig) => {
       const one = marchRig(rig)
       const other = marchRig(mirrorRig(rig))
       const scale = evaluateScale(one)
@@ -140,7 +140,7 @@ describe('random lines', () => {
   })
 
   it('twice the speeds, forces and gaps: twice the stress, to the bit', () => {
-    check(60, makeRigs(), (rig) => {
+    check(40, makeRigs(), (rig) => {
       const one = marchRig(rig).record
       const two = marchRig(scaleRig(rig, { length: 1, time: 1, area: 1, force: 2, motion: 2 })).record
       expect(two.envelope.tension).toEqual(one.envelope.tension.map((F) => 2 * F))
@@ -152,7 +152,7 @@ describe('random lines', () => {
   })
 
   it('twice as long and wide, over twice the time: the same stress at the same speeds, to the bit', () => {
-    check(60, makeRigs(), (rig) => {
+    check(40, makeRigs(), (rig) => {
       const one = marchRig(rig).record
       const two = marchRig(scaleRig(rig, { length: 2, time: 2, area: 4, force: 4, motion: 2 })).record
       expect(two.envelope.tension).toEqual(one.envelope.tension.map((F) => 4 * F))
