@@ -19,7 +19,7 @@ export interface FieldPicture extends FieldGrid {
 }
 
 /** Most pixels asked for at once: more would keep the page from answering while it paints. */
-const MOST_PIXELS = 2.4e6
+const MOST_PIXELS = 2e6
 
 /** The whole run in few cells: their extremes are those of the run. */
 const OVERVIEW = { columns: 48, rows: 48 }
