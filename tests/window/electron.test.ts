@@ -20,7 +20,7 @@ describe.skipIf(!hasRuntime || !hasScreen)(`the window in Electron (${why})`, ()
       const page = await app.firstWindow()
       expect(page.url()).toBe('barwright://app/')
       await page.getByText(NOTICE).waitFor()
-      await page.getByText('Open a rig file').waitFor()
+      await page.getByText('Governing margin').first().waitFor()
       expect(await page.evaluate(() => [typeof require, typeof process, typeof module])).toEqual([
         'undefined',
         'undefined',
