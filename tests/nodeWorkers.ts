@@ -15,7 +15,7 @@ export function nodeWorkers(): Plugin {
   let folder: string | null = null
 
   async function buildWorker(entry: string): Promise<string> {
-    folder ??= mkdtempSync(join(tmpdir(), 'barwright-worker-'))
+    folder ??= makeFolder()
     const outDir = mkdtempSync(join(folder, 'built-'))
     await build({
       configFile: false,
@@ -43,8 +43,12 @@ export function nodeWorkers(): Plugin {
       return `import { Worker } from 'node:worker_threads'
         export default (options) => new Worker(new URL(${JSON.stringify(await built.get(entry))}), options)`
     },
-    closeBundle() {
-      if (folder !== null) rmSync(folder, { recursive: true, force: true })
-    },
   }
+}
+
+/** A folder that lasts as long as the process. */
+function makeFolder(): string {
+  const folder = mkdtempSync(join(tmpdir(), 'barwright-worker-'))
+  process.once('exit', () => rmSync(folder, { recursive: true, force: true }))
+  return folder
 }
