@@ -16,10 +16,10 @@ export interface JointTrace {
 }
 
 /**
- * Describes the chart of a joint: the force that it carries, and its first contact as a dimension line.
+ * Describes the chart of a joint: the force that it carries, and its first whole contact as a dimension line.
  *
  * @param trace - in the range of time that is shown
- * @param contacts - when it carries force [s]
+ * @param contact - the one whose duration is shown, whole [s]; null for none
  * @param peak - force of largest magnitude in the whole run, so that the axis stays as it is under zoom [N]
  * @param frame - shared by all traces
  * @param width - of the plot [px]
@@ -27,7 +27,7 @@ export interface JointTrace {
  */
 export function makeContactSpec(
   trace: JointTrace,
-  contacts: Stretch[],
+  contact: Stretch | null,
   peak: number,
   frame: TraceFrame,
   width: number,
@@ -63,15 +63,14 @@ export function makeContactSpec(
   spec.curves.push({ points, colour: 'transparent', width: 0, fill: { to: 'zero', colour } })
   spec.annotations.push(makeLine({ x: 0 }, inks))
 
-  const first = contacts.at(0)
-  if (first) {
-    const pixels = ((first.to - first.from) * height) / (toT - fromT)
+  if (contact) {
+    const pixels = ((contact.to - contact.from) * height) / (toT - fromT)
     const beside = low < 0 ? low - 0.5 * room : high + 0.5 * room
-    spec.annotations.push(makeDimension(beside, first.from, first.to, '', pixels, inks))
+    spec.annotations.push(makeDimension(beside, contact.from, contact.to, '', pixels, inks))
     spec.above = ({ context, y, area }) => {
-      const at = y.at(first.to) - inks.size / 2 - 3
-      if (at - inks.size / 2 < area.top || y.at(first.to) > area.bottom) return
-      drawHaloText(context, writeDuration(first.to - first.from), area.left + 4, at, {
+      const at = y.at(contact.to) - inks.size / 2 - 3
+      if (at - inks.size / 2 < area.top || y.at(contact.to) > area.bottom) return
+      drawHaloText(context, writeDuration(contact.to - contact.from), area.left + 4, at, {
         font: writeFont(inks.size, 600),
         ink: inks.ink,
         halo: inks.paper,

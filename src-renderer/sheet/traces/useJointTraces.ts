@@ -14,8 +14,10 @@ export interface JointReading {
   name: string
   kind: string
   trace: JointTrace
-  /** When it carries force [s]. */
+  /** When it carries force [s]; those that reach over the time that is looked at are cut there. */
   contacts: Stretch[]
+  /** The first of them that is seen whole, to a time step; null where none is. */
+  whole: Stretch | null
   /** Force of largest magnitude in the whole run [N]. */
   peak: number
   /** The run that it was read from; null before it is. */
@@ -48,24 +50,30 @@ export function useJointTraces(): {
       joints.map(async ({ kind, x }, i) => {
         const joint = result.joints[i]
         if (kind === 'bonded' || !joint) return []
-        const values = await bridge.readField({
-          slot: run.slot,
-          quantity: 'force',
-          fromX: x - SLIVER * view.lengthX.value,
-          toX: x,
-          fromT,
-          toT,
-          columns: 1,
-          rows,
-        })
+        const least = REST * Math.abs(joint.peakForce)
+        const read = async (from: number, to: number, count: number): Promise<Float32Array> =>
+          bridge.readField({
+            slot: run.slot,
+            quantity: 'force',
+            fromX: x - SLIVER * view.lengthX.value,
+            toX: x,
+            fromT: from,
+            toT: to,
+            columns: 1,
+            rows: count,
+          })
+        const values = await read(fromT, toT, rows)
+        const contacts = listSpells(values, least, fromT, toT)
+        const whole = findWhole(contacts, { fromT, toT })
         return [
           {
             name: joint.name,
             kind,
             trace: readTrace(values, fromT, toT),
-            result,
+            contacts,
+            whole: whole && (await sharpen(whole, (toT - fromT) / rows, result.run.timeStep, least, read)),
             peak: joint.peakForce,
-            contacts: listSpells(values, REST * Math.abs(joint.peakForce), fromT, toT),
+            result,
           },
         ]
       }),
@@ -90,7 +98,17 @@ export function useJointTraces(): {
       const joint = run.result.value?.joints[i]
       if (kind === 'bonded' || !joint) return []
       const { name, peakForce: peak } = joint
-      return [known.get(name) ?? { name, kind, trace: readTrace([], 0, 1), contacts: [], peak, result: null }]
+      return [
+        known.get(name) ?? {
+          name,
+          kind,
+          trace: readTrace([], 0, 1),
+          contacts: [],
+          whole: null,
+          peak,
+          result: null,
+        },
+      ]
     })
   }
 
@@ -123,6 +141,39 @@ interface Wanted {
   toT: number
   rows: number
 }
+
+/**
+ * Finds the first contact that is not cut by the time that is looked at; one at the start of the run is whole.
+ *
+ * @param contacts - in that time, ascending [s]
+ * @param shown - the time [s]
+ */
+export function findWhole(
+  contacts: readonly Stretch[],
+  { fromT, toT }: { fromT: number; toT: number },
+): Stretch | null {
+  return contacts.find(({ from, to }) => (from > fromT || fromT <= 0) && to < toT) ?? null
+}
+
+/** Reads both ends of a contact again, to a time step: the rows of the trace are coarser. */
+async function sharpen(
+  { from, to }: Stretch,
+  row: number,
+  step: number,
+  least: number,
+  read: (from: number, to: number, rows: number) => Promise<Float32Array>,
+): Promise<Stretch> {
+  const rows = Math.min(MOST_ROWS, Math.max(2, Math.ceil((2 * row) / step)))
+  const look = async (at: number): Promise<Stretch[]> => {
+    const start = Math.max(0, at - row)
+    return listSpells(await read(start, at + row, rows), least, start, at + row)
+  }
+  const [first, last] = await Promise.all([look(from), look(to)])
+  return { from: first.at(-1)?.from ?? from, to: last.at(0)?.to ?? to }
+}
+
+/** Rows that are read about one end of a contact, at most. */
+const MOST_ROWS = 256
 
 /**
  * Makes a trace of the extremes in each row.

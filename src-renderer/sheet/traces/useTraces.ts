@@ -96,13 +96,18 @@ export function useTraces(): {
   }
 
   function makeJointItem(reading: JointReading): TraceItem {
-    const { name, kind, trace, contacts } = reading
+    const { name, kind, trace, contacts, whole } = reading
     const drawn = run.line.value?.joints.find((_joint, i) => run.result.value?.joints[i]?.name === name)
     const { frozen, result } = run
     const under = frozen.value && frozen.value !== result.value ? earlier.get(frozen.value) : undefined
-    const first = contacts.at(0)
-    const lasts = first ? writeDuration(first.to - first.from) : ''
-    const said = first ? `first ${lasts}` : reading.peak === 0 ? 'carries nothing' : 'none in view'
+    const lasts = whole ? writeDuration(whole.to - whole.from) : ''
+    const isFirst = whole !== null && frame.value.fromT <= 0 && whole.from < contacts[0].to
+    const rest = contacts.length > 0 ? 'none whole in view' : 'none in view'
+    const said = whole
+      ? `${isFirst ? 'first ' : 'lasts '}${lasts}`
+      : reading.peak === 0
+        ? 'carries nothing'
+        : rest
     const text = reading.result === result.value ? said : 'being read'
     // A reading that is still that of the run before is drawn as stale.
     const shown = reading.result === result.value ? frame.value : { ...frame.value, inks: staleInks.value }
@@ -122,7 +127,7 @@ export function useTraces(): {
       chart: (width) =>
         makeContactSpec(
           trace,
-          contacts,
+          whole,
           reading.peak,
           shown,
           width,

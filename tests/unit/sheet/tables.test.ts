@@ -70,7 +70,17 @@ describe('tables behind the charts', () => {
     const joint = { t: Float64Array.of(0, 0.1e-3, 0.2e-3), force: Float64Array.of(0, -5, -9) }
     const table = makeMomentTable(
       result,
-      [{ name: 'striker | shaft', kind: 'contact', trace: joint, contacts: [], peak: -9, result }],
+      [
+        {
+          name: 'striker | shaft',
+          kind: 'contact',
+          trace: joint,
+          contacts: [],
+          whole: null,
+          peak: -9,
+          result,
+        },
+      ],
       0.16e-3,
     )
     const at = (heading: string, row: number) => table.columns.find((one) => one.heading === heading)?.at(row)

@@ -14,7 +14,7 @@ import { makeGaugeSpec } from '../../../src-renderer/sheet/traces/makeGaugeSpec'
 import { findPulseWindow, listPassing } from '../../../src-renderer/sheet/traces/pulseWindow'
 import { readNearest } from '../../../src-renderer/sheet/traces/readNearest'
 import type { TraceFrame } from '../../../src-renderer/sheet/traces/traceFrame'
-import { readTrace } from '../../../src-renderer/sheet/traces/useJointTraces'
+import { findWhole, readTrace } from '../../../src-renderer/sheet/traces/useJointTraces'
 import { solvePage, STEPPED_RIG } from './solvePage'
 import { testInks } from './testInks'
 
@@ -115,7 +115,7 @@ describe('traces and field', () => {
       const field = makeFieldScales({ fromX: 0, toX: 1, fromT, toT }, 700, frame.height)
       const specs = [
         makeGaugeSpec(result.gauges[0], 'stress', 350e6, { ...frame, fromT, toT }, 126, null),
-        makeContactSpec(readTrace([0, 0, -5, 0], fromT, toT), [], -5, { ...frame, fromT, toT }, 88, null),
+        makeContactSpec(readTrace([0, 0, -5, 0], fromT, toT), null, -5, { ...frame, fromT, toT }, 88, null),
         makeEnergySpec(evaluateEnergyShares(result.energy)!, { ...frame, fromT, toT }, 60, null),
       ]
       for (const spec of specs) {
@@ -225,5 +225,17 @@ describe('parts of traces', () => {
     const { t, force } = readTrace([-5, 1, -1, 4, NaN, NaN], 0, 3)
     expect([...t]).toEqual([0.5, 1.5, 2.5])
     expect([...force]).toEqual([-5, 4, 0])
+  })
+
+  it('take no contact for whole that the view cuts, but one that begins with the run', () => {
+    const contacts = [
+      { from: 0, to: 1 },
+      { from: 2, to: 3 },
+      { from: 4, to: 5 },
+    ]
+    expect(findWhole(contacts, { fromT: 0, toT: 5 })).toEqual(contacts[0])
+    const cut = [{ from: 0.5, to: 1 }, contacts[1]]
+    expect(findWhole(cut, { fromT: 0.5, toT: 5 })).toEqual(contacts[1])
+    expect(findWhole([{ from: 4, to: 4.5 }], { fromT: 3.5, toT: 4.5 })).toBeNull()
   })
 })
