@@ -213,7 +213,10 @@ export interface GaugeTable {
   /** [m] */
   x: number
   t: number[]
+  /** Force over the undeformed area [Pa]. */
   stress: number[]
+  /** Force over the deformed area, P (1 + strain)^(2 nu) [Pa]; empty but for runs with finite strain. */
+  trueStress: number[]
   strain: number[]
   force: number[]
   velocity: number[]

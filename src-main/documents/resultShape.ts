@@ -111,6 +111,7 @@ export const RESULT_SHAPE: ShapeOf<Result> = {
       x: null,
       t: null,
       stress: null,
+      trueStress: null,
       strain: null,
       force: null,
       velocity: null,

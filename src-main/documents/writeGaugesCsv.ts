@@ -1,10 +1,12 @@
 import type { GaugeTable } from '../contract/result'
 import { writeCsv } from './writeCsv'
 
-type TraceKey = 'stress' | 'strain' | 'force' | 'velocity' | 'rightgoingForce' | 'leftgoingForce' | 'bridge'
+type TraceKey =
+  'stress' | 'trueStress' | 'strain' | 'force' | 'velocity' | 'rightgoingForce' | 'leftgoingForce' | 'bridge'
 
 const TRACES: readonly [TraceKey, string][] = [
   ['stress', 'stress [Pa]'],
+  ['trueStress', 'true stress [Pa]'],
   ['strain', 'strain [1]'],
   ['force', 'force [N]'],
   ['velocity', 'velocity [m/s]'],
@@ -13,10 +15,13 @@ const TRACES: readonly [TraceKey, string][] = [
   ['bridge', 'bridge [V]'],
 ]
 
+/** Traces that a gauge may be without. */
+const OPTIONAL: readonly TraceKey[] = ['trueStress', 'bridge']
+
 /**
  * Writes all gauge traces as one CSV: the time, then the columns of each gauge under its name.
  *
- * @param gauges - traces that share their times, SI; a gauge without a bridge has no bridge column
+ * @param gauges - traces that share their times, SI; bridge and true stress only where a gauge has them
  * @returns the text of `gauges.csv` in parts; traces of different length throw: it would be a fault of the program
  */
 export function writeGaugesCsv(gauges: GaugeTable[]): Generator<string> {
@@ -25,7 +30,7 @@ export function writeGaugesCsv(gauges: GaugeTable[]): Generator<string> {
   const columns: ArrayLike<number>[] = [times]
   for (const gauge of gauges) {
     for (const [key, heading] of TRACES) {
-      if (key === 'bridge' && gauge.bridge.length === 0) continue
+      if (OPTIONAL.includes(key) && gauge[key].length === 0) continue
       if (gauge[key].length !== times.length) throw new Error(`gauge "${gauge.name}": ${key} misses times`)
       headings.push(`${gauge.name} ${heading}`)
       columns.push(gauge[key])

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import type { Material, Rig } from '../../src-main/contract/rig'
-import { evaluateTrueStress } from '../../src-main/engine/exact/evaluateTrueStress'
+import { evaluateTrueStress } from '../../src-main/engine/answers/evaluateTrueStress'
 import { makeElementLine } from '../../src-main/engine/elements/makeElementLine'
 import { makeLine } from '../../src-main/engine/line/makeLine'
 import { marchElements } from '../unit/engine/march'

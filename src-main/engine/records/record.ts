@@ -23,6 +23,7 @@ export interface PlaceTrace {
   area: number
   impedance: number
   modulus: number
+  poisson: number | null
   /** [N] */
   force: Float64Array
   /** du/dx; F/(E A) where the bar is linear. */

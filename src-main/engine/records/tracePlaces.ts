@@ -56,6 +56,7 @@ export function traceGauge(run: MethodRun, gauge: Gauge): PlaceTrace {
     area,
     impedance: Z,
     modulus: material.modulus,
+    poisson: material.poisson,
   }
   const { force, velocity, strain } = share > 0 ? blend(here, there, share) : here
   const stiffness = material.modulus * area

@@ -1,4 +1,4 @@
-import { evaluateTrueStress } from '../../engine/exact/evaluateTrueStress'
+import { evaluateTrueStress } from '../../engine/answers/evaluateTrueStress'
 import {
   HENCKY_FAN,
   HENCKY_MEETING,

@@ -123,6 +123,7 @@ export function makeTestResult(): Result {
         x: 0.7,
         t,
         stress: force.map((value) => value / 314e-6),
+        trueStress: [],
         strain: force.map((value) => value / 314e-6 / 207e9),
         force,
         velocity: force.map((value) => (0 - value) / 12660),

@@ -1,4 +1,4 @@
-import type { Profile } from '../../../contract/bridge'
+import type { Profile, ProfileRequest } from '../../../contract/bridge'
 import type { Recorder } from '../../march/march'
 import type { MethodRun } from '../../march/methodRun'
 import { drawSamples } from './drawSamples'
@@ -14,8 +14,8 @@ import { makeWaveSpan } from './waveSpan'
 export interface RunField extends Recorder {
   /** Signed extremes per pixel, shape (rows, columns, 2); NaN where no bar is and outside the run. */
   readTile(window: FieldWindow): Float32Array
-  /** Quantities along the line at time t [s], at the middles of equal columns. */
-  readProfile(t: number, columns: number): Profile
+  /** Quantities along the line, or along a part of it, at time t [s], at the middles of equal columns. */
+  readProfile(t: number, columns: number, part?: ProfileRequest['part']): Profile
 }
 
 /**
@@ -54,7 +54,7 @@ export function makeRunField(run: MethodRun): RunField {
       })
       return tile.values
     },
-    readProfile: (t, columns) =>
-      readProfile({ line, spans: readSpans(), stride: samples.stride }, t, columns),
+    readProfile: (t, columns, part) =>
+      readProfile({ line, spans: readSpans(), stride: samples.stride }, t, columns, part),
   }
 }

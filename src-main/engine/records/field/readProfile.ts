@@ -1,4 +1,4 @@
-import type { Profile } from '../../../contract/bridge'
+import type { Profile, ProfileRequest } from '../../../contract/bridge'
 import type { Line } from '../../line/line'
 import type { FieldSpan } from './fieldSpan'
 import { findColumn, findRow } from './sampleField'
@@ -15,11 +15,13 @@ interface Motion {
  *
  * @param field the line's spans in order, and the steps from one sample to the next
  * @param t [s]; outside the run every value is NaN
+ * @param part of the line [m]; outside the line every value is NaN, and a face belongs to what is left of it
  */
 export function readProfile(
   field: { line: Line; spans: readonly FieldSpan[]; stride: number },
   t: number,
   columns: number,
+  part: ProfileRequest['part'] = { fromX: 0, toX: field.line.length },
 ): Profile {
   const { line, spans, stride } = field
   const empty = () => new Float64Array(columns).fill(NaN)
@@ -36,9 +38,9 @@ export function readProfile(
   const k = t / line.dt
   let index = 0
   for (let i = 0; i < columns; i++) {
-    const x = ((i + 0.5) * line.length) / columns
+    const x = part.fromX + ((i + 0.5) * (part.toX - part.fromX)) / columns
     profile.x[i] = x
-    if (!(k >= 0 && k <= line.steps)) continue
+    if (!(k >= 0 && k <= line.steps && x >= 0 && x <= line.length)) continue
     while (index < line.spans.length - 1 && x > line.spans[index].to) index++
     const span = line.spans[index]
     const p = Math.min(span.cells, ((x - span.from) / (span.to - span.from)) * span.cells)
