@@ -108,6 +108,9 @@ function makeDataset({ points, colour, width, dash, fill }: Curve): ChartDataset
     borderDash: dash ?? [],
     borderJoinStyle: 'round',
     pointRadius: 0,
+    // Plain colours of their own, or a fill that is made for the plot would be asked for at every point.
+    pointBackgroundColor: 'transparent',
+    pointBorderColor: 'transparent',
     pointHitRadius: 0,
     tension: 0,
     fill: fill ? (fill.to === 'zero' ? 'origin' : '-1') : false,
