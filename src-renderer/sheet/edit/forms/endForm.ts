@@ -72,10 +72,7 @@ export function makeEndForm(document: RigDocument, path: string): PartForm {
     )
   }
   if (kind === 'penetration') {
-    row.push(
-      value(`${path}.loading`, 'Stiffness going in'),
-      value(`${path}.unloading`, 'Coming back'),
-    )
+    row.push(value(`${path}.loading`, 'Stiffness going in'), value(`${path}.unloading`, 'Coming back'))
   }
   if (kind === 'mass' || kind === 'support' || kind === 'wall') row.push(value(`${path}.gap`, 'Gap', 'none'))
   return { rows: [row], actions: [], ...(pulse ? { pulse: `${path}.pulse` } : {}) }

@@ -60,7 +60,6 @@ function setFineness(document: RigDocument, by: unknown): RigDocument {
 
 /** What belongs to the rig as a whole. */
 export function makeRigForm(document: RigDocument): PartForm {
-  const firstBar = 'bars[0]'
   return {
     rows: [
       [
@@ -72,11 +71,15 @@ export function makeRigForm(document: RigDocument): PartForm {
     ],
     actions: [
       { word: 'Left end', select: 'leftEnd' },
-      ...(document.bars ?? []).map(({ name }, i) => ({
-        word: name || `Bar ${i + 1}`,
-        select: i === 0 ? firstBar : `bars[${i}]`,
-      })),
+      ...(document.bars ?? []).flatMap(({ name }, i) => [
+        ...(i === 0 ? [] : [{ word: `Joint ${i}`, select: `joints[${i - 1}]` }]),
+        { word: name || `Bar ${i + 1}`, select: `bars[${i}]` },
+      ]),
       { word: 'Right end', select: 'rightEnd' },
+      ...(document.gauges ?? []).map(({ name }, i) => ({
+        word: name || `Gauge ${i + 1}`,
+        select: `gauges[${i}]`,
+      })),
     ],
   }
 }
