@@ -90,6 +90,8 @@ export interface ProfileRequest {
   /** [s] */
   t: number
   columns: number
+  /** The part of the line that is read [m]; the whole where it is left out. */
+  part?: { fromX: number; toX: number }
 }
 
 /** Quantities along the line at one time, shape (columns) each; NaN off the bars. */

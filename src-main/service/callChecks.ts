@@ -44,6 +44,13 @@ const field: Check = (value, what) => {
   return checked
 }
 
+const part: Check = (value, what) => {
+  const checked = checkObject({ fromX: coordinate, toX: coordinate })(value, what)
+  if ('refused' in checked) return checked
+  const { fromX, toX } = checked.value as Record<string, number>
+  return fromX < toX ? checked : { refused: `${what}.fromX must be less than ${what}.toX.` }
+}
+
 /** The arguments that each method takes: every host checks a message against this table. */
 export const CALL_CHECKS: Readonly<Record<BridgeMethod, readonly Check[]>> = {
   about: [],
@@ -62,7 +69,7 @@ export const CALL_CHECKS: Readonly<Record<BridgeMethod, readonly Check[]>> = {
   progress: [slot],
   stop: [slot],
   readField: [field],
-  readProfile: [checkObject({ slot, t: coordinate, columns: checkWhole(1, SIDE) })],
+  readProfile: [checkObject({ slot, t: coordinate, columns: checkWhole(1, SIDE), part: optional(part) })],
   report: [slot],
   'files.open': [],
   'files.openRecent': [place],

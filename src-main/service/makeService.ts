@@ -35,8 +35,7 @@ export function makeService({ samplesFolder, findFile = () => null }: ServiceOpt
     progress: async (slot) => slots.progress(slot),
     stop: (slot) => slots.stop(slot),
     readField: ({ slot, ...window }) => slots.ask(slot, { kind: 'field', window }) as Promise<Float32Array>,
-    readProfile: ({ slot, t, columns }) =>
-      slots.ask(slot, { kind: 'profile', t, columns }) as Promise<Profile>,
+    readProfile: ({ slot, ...wanted }) => slots.ask(slot, { kind: 'profile', ...wanted }) as Promise<Profile>,
     report: (slot) => slots.ask(slot, { kind: 'report' }) as Promise<string>,
     close: () => slots.close(),
   }

@@ -36,7 +36,7 @@ export function answerFromRun(kept: KeptRun, question: Exclude<Question, { kind:
     case 'field':
       return handOver(kept.field.readTile(question.window))
     case 'profile': {
-      const profile = kept.field.readProfile(question.t, question.columns)
+      const profile = kept.field.readProfile(question.t, question.columns, question.part)
       return { value: profile, buffers: Object.values(profile).map(({ buffer }) => buffer as ArrayBuffer) }
     }
     case 'report':

@@ -1,4 +1,4 @@
-import type { SolveRequest } from '../contract/bridge'
+import type { ProfileRequest, SolveRequest } from '../contract/bridge'
 import type { FieldWindow } from '../engine/solveRig'
 
 /** One rig to be solved in a worker. */
@@ -11,7 +11,7 @@ export interface SolveJob extends Pick<SolveRequest, 'text' | 'coarse' | 'method
 export type Question =
   | { kind: 'solve'; job: SolveJob }
   | { kind: 'field'; window: FieldWindow }
-  | { kind: 'profile'; t: number; columns: number }
+  | ({ kind: 'profile' } & Omit<ProfileRequest, 'slot'>)
   | { kind: 'report' }
 
 /** A message to a worker: a question to be answered, the wish to stop the solve, or to let the run go. */

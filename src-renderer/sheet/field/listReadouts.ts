@@ -3,7 +3,7 @@ import { formatQuantity } from '../../format/formatQuantity'
 import type { UnitDimension, UnitSystem } from '../../format/units'
 import { findFrom } from '../../plot/thinTrace'
 import { QUANTITIES } from './quantities'
-import type { Moment } from './useProfile'
+import type { ProfileScale } from './useProfile'
 
 /** One quantity at the cursor, as it is read. */
 export interface Readout {
@@ -38,21 +38,20 @@ const ROUNDING = 1e-9
 /**
  * Reads every quantity at a place.
  *
- * @param moment - along the line at the cursor's time; null where there is none
- * @param x - the place [m]
+ * @param values - at the place, profiles of one column; null where there is none
+ * @param scale - largest magnitude of each quantity met so far in the run; null where none was met
  * @param units - whose units
  * @returns a row for each quantity
  */
 export function listReadouts(
-  moment: Pick<Moment, 'profile' | 'scale'> | null,
-  x: number | null,
+  values: Profile | null,
+  scale: ProfileScale | null,
   units: UnitSystem,
 ): Readout[] {
-  const column = moment && x !== null ? findColumn(moment.profile.x, x) : -1
   return ROWS.map(({ name, key, dimension, quantity }) => {
-    const value = moment && column >= 0 ? moment.profile[key][column] : Number.NaN
-    if (!moment || !Number.isFinite(value)) return { name, quantity, text: '–', unit: '' }
-    const isRounding = Math.abs(value) < ROUNDING * moment.scale[key]
+    const value = values?.[key][0] ?? Number.NaN
+    if (!Number.isFinite(value)) return { name, quantity, text: '–', unit: '' }
+    const isRounding = scale !== null && Math.abs(value) < ROUNDING * scale[key]
     return { name, quantity, ...formatQuantity(isRounding ? 0 : value, dimension, units) }
   })
 }

@@ -17,7 +17,7 @@ const GOOD: Record<string, unknown[][]> = {
   progress: [['s']],
   stop: [['s']],
   readField: [[field], [{ ...field, fromX: -1e9, toX: 1e9, columns: 2048, rows: 2048 }]],
-  readProfile: [[profile]],
+  readProfile: [[profile], [{ ...profile, part: { fromX: 0, toX: 1 } }]],
   report: [['s']],
   'files.open': [[]],
   'files.openRecent': [['file:1']],
@@ -90,6 +90,8 @@ describe('checkCall', () => {
     ['readField', { ...field, columns: 8192, rows: 8192 }, /67108864 pixels; at most 4194304/],
     ['readProfile', { ...profile, columns: 1e9 }, /\.columns is 1000000000/],
     ['readProfile', { ...profile, t: undefined }, /\.t must be a number/],
+    ['readProfile', { ...profile, part: { fromX: 1, toX: 1 } }, /\.part\.fromX must be less than/],
+    ['readProfile', { ...profile, part: { fromX: 0 } }, /\.part\.toX must be a number/],
     ['files.openRecent', { path: '/etc/passwd' }, /must be text/],
     ['files.noteSheet', { ...sheet, place: 7 }, /\.place must be text/],
   ])('refuses %s with %j', (method, argument, reason) => {

@@ -2,27 +2,24 @@ import { describe, expect, it } from 'vitest'
 import { findColumn, listReadouts } from '../../../../src-renderer/sheet/field/listReadouts'
 
 const names = ['x', 'stress', 'force', 'velocity', 'energy', 'strain', 'rightgoing', 'leftgoing'] as const
-const give = (values: Record<(typeof names)[number], number[]>) => {
-  const profile = Object.fromEntries(names.map((name) => [name, Float64Array.from(values[name])])) as never
-  const scale = Object.fromEntries(
-    names.map((name) => [name, Math.max(...values[name].map(Math.abs))]),
-  ) as never
-  return { profile, scale }
+type Values = Record<(typeof names)[number], number>
+const values: Values = {
+  x: 0.1,
+  stress: -215e6,
+  force: -67.5e3,
+  velocity: -5.33,
+  energy: 7.01e4,
+  strain: -1.039e-3,
+  rightgoing: 1e-8,
+  leftgoing: -67.5e3,
 }
-const moment = give({
-  x: [0.1, 0.3],
-  stress: [-215e6, 0],
-  force: [-67.5e3, 0],
-  velocity: [-5.33, 1],
-  energy: [7.01e4, 0],
-  strain: [-1.039e-3, 0],
-  rightgoing: [1e-8, 1e3],
-  leftgoing: [-67.5e3, Number.NaN],
-})
+const give = (some: Partial<Values>) =>
+  Object.fromEntries(names.map((name) => [name, Float64Array.of({ ...values, ...some }[name])])) as never
+const scale = { ...values, stress: 3e8, rightgoing: 1e3 }
 
 describe('read-outs', () => {
-  it('give every quantity at the nearest place, with its unit', () => {
-    const rows = listReadouts(moment, 0.12, 'si')
+  it('give every quantity with its unit, and zero for what is rounding beside the rest of the run', () => {
+    const rows = listReadouts(give({}), scale, 'si')
     expect(rows.map(({ name, text, unit }) => `${name} ${text} ${unit}`)).toEqual([
       'Stress −215.0 MPa',
       'Force −67.50 kN',
@@ -40,9 +37,12 @@ describe('read-outs', () => {
     ])
   })
 
-  it('give a dash where there is no bar or no moment', () => {
-    expect(listReadouts(moment, 0.3, 'si').at(-1)).toMatchObject({ text: '–', unit: '' })
-    expect(listReadouts(null, 0.3, 'si').every(({ text }) => text === '–')).toBe(true)
+  it('give a dash where there is no bar or no answer', () => {
+    expect(listReadouts(give({ leftgoing: Number.NaN }), scale, 'si').at(-1)).toMatchObject({
+      text: '–',
+      unit: '',
+    })
+    expect(listReadouts(null, null, 'si').every(({ text }) => text === '–')).toBe(true)
   })
 
   it('find the nearest column', () => {
