@@ -1,4 +1,4 @@
-import { computed, inject, provide, ref, type ComputedRef, type InjectionKey, type Ref } from 'vue'
+import { computed, inject, nextTick, provide, ref, type ComputedRef, type InjectionKey, type Ref } from 'vue'
 import { useSelection } from '../../stores/useSelection'
 import { useRemove } from '../edit/useRemove'
 
@@ -16,9 +16,10 @@ const KEY: InjectionKey<LineParts> = Symbol('line parts')
  * Makes the way around the parts of the line and hands it to all below.
  *
  * @param paths - of the parts, from left to right
+ * @param reveal - brings a part into sight
  * @returns the way
  */
-export function provideLineParts(paths: ComputedRef<string[]>): LineParts {
+export function provideLineParts(paths: ComputedRef<string[]>, reveal: (path: string) => void): LineParts {
   const { path: chosen, select } = useSelection()
   const { remove } = useRemove()
   const focused = ref<string | null>(null)
@@ -29,16 +30,20 @@ export function provideLineParts(paths: ComputedRef<string[]>): LineParts {
       null,
   )
 
+  async function go(from: Element, path: string): Promise<void> {
+    const svg = from.closest('svg')
+    reveal(path)
+    await nextTick()
+    svg?.querySelector<SVGElement>(`[data-path='${CSS.escape(path)}']`)?.focus()
+  }
+
   function hear(event: KeyboardEvent, path: string): void {
     const at = paths.value.indexOf(path)
     const to = { ArrowRight: at + 1, ArrowLeft: at - 1, Home: 0, End: paths.value.length - 1 }[event.key]
     if (event.key === 'Enter' || event.key === ' ') select(path)
     else if (event.key === 'Delete') remove(path)
     else if (to === undefined || !paths.value[to]) return
-    else {
-      const svg = (event.currentTarget as Element).closest('svg')
-      svg?.querySelector<SVGElement>(`[data-path='${CSS.escape(paths.value[to])}']`)?.focus()
-    }
+    else void go(event.currentTarget as Element, paths.value[to])
     event.preventDefault()
   }
   const parts: LineParts = { reachable, focused, hear }

@@ -56,7 +56,7 @@ export function makeMaterialForm(document: RigDocument, path: string): PartForm 
         label: 'Source',
         kind: 'words',
         empty: 'not said',
-        width: 190,
+        width: 400,
       },
     ],
     actions: [
