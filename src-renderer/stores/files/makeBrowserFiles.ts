@@ -1,4 +1,5 @@
 import type { FileWays, OpenedFile, RecentFile } from './fileWays'
+import { saveFile } from '../../sheet/charts/saveFile'
 import { readFileText } from './readFileText'
 
 /** A file that the browser may write to where the user chose it. */
@@ -65,7 +66,7 @@ export function makeBrowserFiles(page: Window): FileWays {
         remember(handle.name, () => readHandle(handle))
         return { name: handle.name, place: null, target: handle }
       }
-      download(page, name, text, 'application/json')
+      saveFile(name, new Blob([text], { type: 'application/json' }))
       return { name, place: null, target: null }
     },
     readDropped,
@@ -91,21 +92,4 @@ function chooseFile(document: Document): Promise<File | null> {
     input.addEventListener('cancel', () => resolve(null))
     input.click()
   })
-}
-
-/**
- * Hands the user a text as a download.
- *
- * @param page - the page's window
- * @param name - of the file
- * @param text - its content
- * @param type - its media type
- */
-export function download(page: Window, name: string, text: string, type: string): void {
-  const address = URL.createObjectURL(new Blob([text], { type }))
-  const link = page.document.createElement('a')
-  link.href = address
-  link.download = name
-  link.click()
-  setTimeout(() => URL.revokeObjectURL(address), 10_000)
 }
