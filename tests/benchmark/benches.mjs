@@ -1,9 +1,12 @@
+import { measureDrag } from './window.mjs'
+
 /**
  * The list of what is measured.
  *
  * @param engine - the bundled engine with its benchmark rigs
  * @param references - the C references by method; each call runs one and gives its seconds
- * @returns rows { name, ours, against, atMost, warm, repeats }; ours and against give seconds
+ * @returns rows { name, ours, against, atMost, warm, repeats }; ours and against give seconds,
+ *   at once or later
  */
 export function listBenches(engine, references) {
   const time = (march, rig) => () => {
@@ -116,5 +119,7 @@ export function listBenches(engine, references) {
       2,
       7,
     ),
+    // Once: the longest task of all is asked for, no median.
+    row('window: longest task over 50 ms while dragging', measureDrag, () => 0.05, 1, 0, 1),
   ]
 }

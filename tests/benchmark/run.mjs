@@ -1,6 +1,7 @@
 /**
  * Measures the engine against the plain C references of this folder, side by side in one run: each
- * row is the median of interleaved repeats, given as a ratio. `npm run benchmark [-- name ...]`.
+ * row is the median of interleaved repeats, given as a ratio; and the window against what it may take.
+ * `npm run benchmark [-- name ...]`.
  */
 import { execFileSync } from 'node:child_process'
 import { mkdtempSync, rmSync } from 'node:fs'
@@ -33,7 +34,7 @@ try {
   console.log('case'.padEnd(58) + 'ours'.padStart(11) + 'against'.padStart(11) + '   ratio   asked')
   for (const bench of listBenches(engine, references)) {
     if (wanted.length > 0 && !wanted.some((word) => bench.name.includes(word))) continue
-    const { ours, against } = measure(bench)
+    const { ours, against } = await measure(bench)
     const ratio = ours / against
     const asked =
       bench.atMost === null ? '' : `${ratio <= bench.atMost ? 'met' : 'MISSED'}, at most ${bench.atMost}`
@@ -51,11 +52,11 @@ try {
 }
 
 /** Interleaves both sides and takes the median of each; the first rounds only warm up. */
-function measure({ ours, against, warm, repeats }) {
+async function measure({ ours, against, warm, repeats }) {
   const times = { ours: [], against: [] }
   for (let round = 0; round < warm + repeats; round++) {
-    const one = ours()
-    const other = against()
+    const one = await ours()
+    const other = await against()
     if (round < warm) continue
     times.ours.push(one)
     times.against.push(other)
