@@ -67,7 +67,13 @@ describe('what is looked at', () => {
 })
 
 describe('the cursor', () => {
-  const peak = (value: number, at: number, time: number) => ({ peak: value, at, time, localAt: at, localTime: time })
+  const peak = (value: number, at: number, time: number) => ({
+    peak: value,
+    at,
+    time,
+    localAt: at,
+    localTime: time,
+  })
   const governed = {
     governing: { bar: 'shaft', section: 1, sense: 'tension', margin: 0.4 },
     sections: [
