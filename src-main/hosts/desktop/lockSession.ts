@@ -1,10 +1,10 @@
 import type { Session } from 'electron'
-import { isPageAddress, PAGE_SCHEME } from './pageAddress'
+import { isPageAddress, isPageFile, PAGE_SCHEME } from './pageAddress'
 import { serveBundle } from './serveBundle'
 
 /**
- * Confines a window's session: every permission and device denied, nothing downloaded, and no request
- * answered but those for the page's own bundle.
+ * Confines a window's session: every permission and device denied, no request answered but those for the
+ * page's own bundle, and nothing downloaded but files the page has made, for which Electron asks where.
  *
  * @param session - the session of the window
  * @param bundleFolder - absolute path of the built page
@@ -14,7 +14,11 @@ export function lockSession(session: Session, bundleFolder: string): void {
   session.setPermissionCheckHandler(() => false)
   session.setDevicePermissionHandler(() => false)
   session.setSpellCheckerEnabled(false)
-  session.on('will-download', (event) => event.preventDefault())
-  session.webRequest.onBeforeRequest((details, decide) => decide({ cancel: !isPageAddress(details.url) }))
+  session.on('will-download', (event, item) => {
+    if (!isPageFile(item.getURL())) event.preventDefault()
+  })
+  session.webRequest.onBeforeRequest(({ url }, decide) =>
+    decide({ cancel: !isPageAddress(url) && !isPageFile(url) }),
+  )
   session.protocol.handle(PAGE_SCHEME, (request) => serveBundle(bundleFolder, request))
 }

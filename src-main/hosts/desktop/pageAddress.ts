@@ -13,3 +13,13 @@ export const PAGE_ADDRESS = `${PAGE_SCHEME}://app/`
 export function isPageAddress(address: string): boolean {
   return address.startsWith(PAGE_ADDRESS)
 }
+
+/**
+ * Tells whether an address is that of a file the page itself has made, such as a report or a chart.
+ *
+ * @param address - any text
+ * @returns true for a blob of the program's own page
+ */
+export function isPageFile(address: string): boolean {
+  return address.startsWith(`blob:${PAGE_ADDRESS}`)
+}

@@ -110,10 +110,16 @@ describe('the session', () => {
     expect(defaultSession.setSpellCheckerEnabled).toHaveBeenCalledWith(false)
   })
 
-  it('downloads nothing', () => {
+  it.each([
+    ['blob:barwright://app/0c1f', 0],
+    ['blob:barwright://other/0c1f', 1],
+    ['blob:https://example.com/0c1f', 1],
+    ['https://example.com/tool.exe', 1],
+    ['barwright://app/index.html', 1],
+  ])('downloads only files the page has made: %s is stopped %d times', (url, stopped) => {
     const event = { preventDefault: vi.fn() }
-    electron.session.defaultSession.emit('will-download', event)
-    expect(event.preventDefault).toHaveBeenCalledOnce()
+    electron.session.defaultSession.emit('will-download', event, { getURL: () => url })
+    expect(event.preventDefault).toHaveBeenCalledTimes(stopped)
   })
 
   it.each([
@@ -125,6 +131,8 @@ describe('the session', () => {
     ['file:///etc/passwd', true],
     ['ws://example.com/', true],
     ['data:text/html,x', true],
+    ['blob:barwright://app/0c1f', false],
+    ['blob:https://example.com/0c1f', true],
   ])('answers %s: cancelled %s', (url, cancel) => {
     const decide = vi.fn()
     ask<(details: { url: string }, decide: unknown) => void>(
