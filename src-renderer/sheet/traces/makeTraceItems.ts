@@ -42,7 +42,9 @@ export function makeGaugeItem(
   const bar = result.line.bars.find(({ from, to }) => gauge.x >= from - 1e-9 && gauge.x <= to + 1e-9)
   const local = formatQuantity(gauge.x - (bar?.from ?? 0), 'length', frame.units, { trim: true })
   const frozen = run?.gauges.find((it) => it.name === gauge.name) ?? null
-  const note = describeWindow(findPulseWindow(gauge.pulses), result.run.duration)
+  const pulse = findPulseWindow(gauge.pulses)
+  const note = describeWindow(pulse, result.run.duration)
+  const arrival = pulse === null ? '' : `from ${writeDuration(pulse.from)}`
   return {
     key: `gauge ${gauge.name}`,
     name: gauge.name,
@@ -50,12 +52,13 @@ export function makeGaugeItem(
     x: gauge.x,
     dimension: quantity,
     note,
+    arrival,
     at: (moment) => {
       const value = readNearest(gauge.t, gauge[quantity], moment)
       // What rounding leaves beside the values of this run reads 0.
       return value !== null && Math.abs(value) < ROUNDING * limit ? 0 : value
     },
-    summary: `${quantity} over time at ${local.text} ${local.unit} on ${bar?.name ?? 'the line'}; ${note.text}`,
+    summary: `${quantity} over time at ${local.text} ${local.unit} on ${bar?.name ?? 'the line'}; first pulse ${arrival}, ${note.text}`,
     table: () => makeGaugeTable(gauge, frame),
     claim: { wanted: 126, least: 92 },
     chart: (width) => makeGaugeSpec(gauge, quantity, limit, frame, width, frozen),
@@ -98,6 +101,7 @@ export function makeJointItem(
     x,
     dimension: 'force',
     note: { text, short: text, alarm: false },
+    arrival: '',
     at: (moment) => readNearest(trace.t, trace.force, moment),
     summary: `force over time in the ${kind} ${name}; ${text}`,
     table: () => makeJointTable(reading, frame),
@@ -128,6 +132,7 @@ export function makeEnergyItem(
     x: null,
     dimension: 'energy',
     note: { text: `of ${total.text} ${total.unit}`, short: `of ${total.text}`, alarm: false },
+    arrival: '',
     at: (moment) => {
       const kinetic = readNearest(energy.t, energy.kinetic, moment)
       const strain = readNearest(energy.t, energy.strain, moment)

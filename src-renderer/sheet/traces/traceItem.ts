@@ -14,6 +14,8 @@ export interface TraceItem {
   x: number | null
   dimension: UnitDimension
   note: TraceNote
+  /** When the first pulse comes, such as `from 117 µs`; empty where that says nothing. */
+  arrival: string
   /** Its value at a moment; null where there is none. */
   at(moment: number): number | null
   /** What it shows, in words. */
