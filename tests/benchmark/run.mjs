@@ -4,7 +4,7 @@
  * `npm run benchmark [-- name ...]`.
  */
 import { execFileSync } from 'node:child_process'
-import { mkdtempSync, rmSync } from 'node:fs'
+import { existsSync, mkdtempSync, rmSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { fileURLToPath, pathToFileURL } from 'node:url'
@@ -27,13 +27,15 @@ try {
       lib: { entry: join(here, 'entry.ts'), formats: ['es'], fileName: 'entry' },
     },
   })
-  const engine = await import(pathToFileURL(join(out, 'entry.mjs')).href).catch(
-    () => import(pathToFileURL(join(out, 'entry.js')).href),
-  )
+  const file = ['entry.mjs', 'entry.js'].map((name) => join(out, name)).find((path) => existsSync(path))
   const references = compileReferences()
+  // A module of its own for each row: what V8 has learnt from one rig's shapes must not slow the next.
+  const load = (row) => import(`${pathToFileURL(file).href}?row=${row}`)
+  const names = listBenches(await load('names'), references).map(({ name }) => name)
   console.log('case'.padEnd(58) + 'ours'.padStart(11) + 'against'.padStart(11) + '   ratio   asked')
-  for (const bench of listBenches(engine, references)) {
-    if (wanted.length > 0 && !wanted.some((word) => bench.name.includes(word))) continue
+  for (let row = 0; row < names.length; row++) {
+    if (wanted.length > 0 && !wanted.some((word) => names[row].includes(word))) continue
+    const bench = listBenches(await load(row), references)[row]
     const { ours, against } = await measure(bench)
     const ratio = ours / against
     const asked =
