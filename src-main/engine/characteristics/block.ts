@@ -15,7 +15,7 @@ export interface Block {
   spanStart: number[]
   /** Z of each cell, shape (cells) [kg/s]; shape (1) for a delay line. */
   impedance: Float64Array
-  leftNode: number
+  /** The line's node at its right face. */
   rightNode: number
 }
 
@@ -64,7 +64,6 @@ function makeBlock(spans: readonly Span[], first: number, last: number, delay: b
     cells,
     spanStart,
     impedance,
-    leftNode: first,
     rightNode: last + 1,
   }
 }

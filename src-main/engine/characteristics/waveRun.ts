@@ -26,7 +26,6 @@ export class LiveBlock implements Block {
   readonly cells: number
   readonly spanStart: number[]
   readonly impedance: Float64Array
-  readonly leftNode: number
   readonly rightNode: number
   readonly probes: Probe[] = []
   /** Tension at which each position comes apart, shape (cells + 1) [N]; null where none does. */
@@ -49,7 +48,6 @@ export class LiveBlock implements Block {
     this.cells = block.cells
     this.spanStart = block.spanStart
     this.impedance = block.impedance
-    this.leftNode = block.leftNode
     this.rightNode = block.rightNode
   }
 }

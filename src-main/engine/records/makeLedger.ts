@@ -22,8 +22,8 @@ export interface Ledger {
 
 /**
  * Makes the ledgers: stored energy from the waves of every cell, work and impulse from what the
- * surroundings gave, losses from what each joint took. Nothing in it is inferred from the balance,
- * so that the closure is a check.
+ * surroundings gave, losses from what each joint took: the work done on it less what it stores. Nothing is
+ * inferred from the balance of the whole, so that the closure is a check.
  *
  * @param steps sampled steps, ascending
  */

@@ -16,7 +16,7 @@ const SAME = 1e-9
 /**
  * Finds the spot of a gauge. On a step between two sections it lies in the right-hand one.
  */
-export function findSpot(line: Line, gauge: Gauge): Spot {
+function findSpot(line: Line, gauge: Gauge): Spot {
   const bar = line.bars[gauge.bar]
   const x = bar.from + gauge.at
   let span = bar.firstSpan

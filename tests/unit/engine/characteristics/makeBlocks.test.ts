@@ -35,8 +35,8 @@ describe('the blocks of a line', () => {
       ['delay', 2, 9, 9, 20],
     ])
     // They cover the line without a gap, each from a node of its own to the next.
-    blocks.forEach(({ leftNode, rightNode, firstSpan, lastSpan }) =>
-      expect([leftNode, rightNode]).toEqual([firstSpan, lastSpan + 1]),
+    blocks.forEach(({ rightNode, firstSpan, lastSpan }, i) =>
+      expect([firstSpan, rightNode]).toEqual([i === 0 ? 0 : blocks[i - 1].rightNode, lastSpan + 1]),
     )
     expect(blocks[1].spanStart).toEqual([0, 7, 27, 30])
     expect([...blocks[1].impedance]).toEqual([1, 2, 3].flatMap((span) => [...line.spans[span].impedance]))
